@@ -1,0 +1,61 @@
+import type SQLite from 'better-sqlite3';
+import { getTableConfig, SQLiteTable } from 'drizzle-orm/sqlite-core';
+import * as schema from './schema';
+
+/** Tables without an owner, each with the reason it may be read without one. */
+export const unownedTables: Record<string, string> = {
+  producer: 'the tenants themselves',
+  person: 'one person may work with several producers',
+  session: 'a session is a person’s, who then chooses the producer by the path',
+  sign_in_link: 'asked for before anybody is known',
+  reading: 'reached by the number of a sensor that a scoped query answered for',
+  outbox: 'sign-in mail belongs to a person; one job works through it and no route reads it',
+  local_mail: 'exists in development and demo only',
+};
+
+export const ownedTables: ReadonlySet<string> = new Set(
+  Object.values(schema)
+    .filter((entry): entry is SQLiteTable & typeof entry => entry instanceof SQLiteTable)
+    .map((table) => getTableConfig(table).name)
+    .filter((name) => !(name in unownedTables)),
+);
+
+const NAMED = /\b(?:from|join|into|update)\s+(?:or\s+\w+\s+)?"?(\w+)"?/gi;
+const SCOPE = /\bproducer_id"?\s*(?:=|in\b)/gi;
+const LITERAL = /'(?:[^']|'')*'/g;
+const seen = new Set<string>();
+let across = 0;
+
+/** Lets `work` touch tables of every producer; the reason is for the reader. Only `system-db.ts` and start-up may. */
+export function acrossProducers<T>(_reason: string, work: () => T): T {
+  across += 1;
+  try {
+    return work();
+  } finally {
+    across -= 1;
+  }
+}
+
+/** Refuses, at preparation, SQL that names a producer's table more often than it binds `producer_id`. */
+export function watchStatements(connection: SQLite.Database): void {
+  const prepare = connection.prepare.bind(connection);
+  connection.prepare = (<T extends unknown[]>(source: string) => {
+    if (across === 0 && !seen.has(source)) {
+      const fault = unscoped(source);
+      if (fault) throw new Error(`statement names ${fault} without its producer: ${source.slice(0, 200)}`);
+      if (seen.size > 5000) seen.clear();
+      seen.add(source);
+    }
+    return prepare<T>(source);
+  }) as typeof connection.prepare;
+}
+
+/** The first producer's table that the statement names without a scope, or null. */
+export function unscoped(source: string): string | null {
+  const sql = source.replace(LITERAL, "''");
+  const named = [...sql.matchAll(NAMED)].map((match) => match[1] ?? '').filter((name) => ownedTables.has(name));
+  if (named.length === 0) return null;
+  const inserts = /\binto\s+"?\w+"?\s*\([^)]*\bproducer_id\b/gi;
+  const scopes = (sql.match(SCOPE)?.length ?? 0) + (sql.match(inserts)?.length ?? 0);
+  return scopes >= named.length ? null : (named[scopes] ?? named[0] ?? null);
+}

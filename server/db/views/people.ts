@@ -1,0 +1,37 @@
+import { sql, type SQL } from 'drizzle-orm';
+import type { Language, Role } from '../../contract/words';
+import type { ProducerDb } from '../producer-db';
+import { memberships, membershipScopes, people, stores } from '../schema';
+
+export interface MemberRow {
+  id: string;
+  name: string;
+  email: string;
+  language: Language;
+  role: Role;
+}
+
+function members(db: ProducerDb, where: (producer: string) => SQL): MemberRow[] {
+  return db.view<MemberRow>(
+    (producer) => sql`
+    select m.id, p.name, p.email, p.language, m.role
+    from ${memberships} m join ${people} p on p.id = m.person_id and p.deactivated_at is null
+    where m.producer_id = ${producer} and m.deactivated_at is null and ${where(producer)}
+    order by p.name, m.id`,
+  );
+}
+
+export const membersByRole = (db: ProducerDb, roles: Role[]): MemberRow[] =>
+  members(db, () => sql`m.role in (${sql.join(roles.map((role) => sql`${role}`), sql`, `)})`);
+
+export const memberById = (db: ProducerDb, id: string): MemberRow | undefined => members(db, () => sql`m.id = ${id}`)[0];
+
+/** The managers who answer for a store, however it was assigned to them. */
+export const managersOfStore = (db: ProducerDb, storeId: string): MemberRow[] =>
+  members(
+    db,
+    (producer) => sql`m.role = 'store-manager' and exists (
+      select 1 from ${membershipScopes} c join ${stores} s on s.producer_id = ${producer} and s.id = ${storeId}
+      where c.producer_id = ${producer} and c.membership_id = m.id
+        and (c.store_id = s.id or c.district_id = s.district_id or c.account_id = s.account_id))`,
+  );

@@ -1,0 +1,40 @@
+import { createHash } from 'node:crypto';
+import type { Request } from 'express';
+import { api } from '../../contract';
+import { limit } from '../../http/limits';
+import { route } from '../../http/route';
+import { endOwnSession, startSession } from '../../http/session';
+import type { MagicLink } from './magic-link';
+
+const addressed = (req: Request): string => {
+  const email: unknown = req.body?.email;
+  return createHash('sha256').update(typeof email === 'string' ? email.trim().toLowerCase() : '').digest('base64url');
+};
+
+export const authRoutes = (links: MagicLink) => [
+  route(
+    api.auth.requestLink,
+    async (_services, { body, req, res }) => {
+      await links.request(req, res, body.email, body.next);
+      return undefined;
+    },
+    ({ patience }) => [
+      limit({ seconds: 600, most: 30 }, patience),
+      limit({ seconds: 600, most: 6, key: addressed }, patience),
+    ],
+  ),
+
+  route(
+    api.auth.signIn,
+    async (services, { body, req, res }) => {
+      await startSession(services, req, await links.accept(req, res, body));
+      return undefined;
+    },
+    ({ patience }) => [limit({ seconds: 600, most: 40 }, patience)],
+  ),
+
+  route(api.auth.signOut, async (_ctx, { req }) => {
+    await endOwnSession(req);
+    return undefined;
+  }),
+];

@@ -1,0 +1,51 @@
+import type { Logger } from 'pino';
+import type { Ability, Action, Subject, Viewer } from '../contract/ability';
+import type { Config } from '../config';
+import type { Database, Producer, ProducerDb, SystemDb } from '../db';
+import type { MailMessage } from '../features/mail/compose';
+import type { Storage } from '../ports/storage';
+import type { Pipeline } from '../telemetry/pipeline';
+
+/** Everything built once at start; only routes' plumbing holds it whole. */
+export interface Services {
+  config: Config;
+  db: Database;
+  system: SystemDb;
+  storage: Storage;
+  pipeline: Pipeline;
+  log: Logger;
+  now: () => number;
+  newId: () => string;
+  /** Multiplies the limits on how often something may be asked; tests raise it. */
+  patience: number;
+}
+
+/** A transaction of one business act: it must say who may and what changed, or it does not commit. */
+export interface ActionTx {
+  db: ProducerDb;
+  authorise: (action: Action, type: Subject, row: object) => void;
+  /** What changed, for the audit trail; ids and plain values only, no names. */
+  audit: (type: Subject, id: string, changes: Record<string, unknown>) => void;
+  mail: (message: MailMessage) => void;
+}
+
+/** What a handler of a producer's route holds: neither the raw database nor the producer's id. */
+export interface ProducerContext {
+  db: ProducerDb;
+  viewer: Viewer;
+  ability: Ability;
+  producer: Pick<Producer, 'slug' | 'name' | 'timeZone' | 'language' | 'urgentPhone'>;
+  now: number;
+  newId: () => string;
+  storage: Storage;
+  baseUrl: string;
+  /** The only door to writing. */
+  act: <T>(name: string, work: (tx: ActionTx) => T) => T;
+}
+
+export interface PersonContext {
+  system: SystemDb;
+  personId: string;
+  sessionHandle: string;
+  now: number;
+}

@@ -1,0 +1,11 @@
+export interface Mail {
+  to: string;
+  subject: string;
+  text: string;
+  html: string;
+}
+
+/** Sends one mail to one address. Rejects when it was not taken over; the outbox then tries again later. */
+export interface MailPort {
+  send: (mail: Mail, idempotencyKey: string) => Promise<void>;
+}

@@ -1,0 +1,28 @@
+import { useTranslation } from 'react-i18next';
+import { Outlet } from 'react-router-dom';
+import { useMe } from '../lib/me';
+import { FailureFrame } from './failure';
+import { Mark } from './mark';
+import { PersonMenu } from './person-menu';
+
+/** The frame of somebody whom no producer has given a role. */
+export function NobodyLayout() {
+  return (
+    <>
+      <header className="flex items-center justify-between px-4 py-3 sm:px-6">
+        <Mark />
+        <PersonMenu />
+      </header>
+      <main id="main" tabIndex={-1} className="px-4 outline-none">
+        <Outlet />
+      </main>
+    </>
+  );
+}
+
+/** Says so, and whom to ask. */
+export function Nobody() {
+  const { t } = useTranslation();
+  const { person } = useMe();
+  return <FailureFrame title={t('nobody.title')} words={t('nobody.words', { email: person.email })} />;
+}

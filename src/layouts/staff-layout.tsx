@@ -1,0 +1,63 @@
+import type { ReactNode } from 'react';
+import { MessagesSquare, Store, type LucideIcon } from 'lucide-react';
+import { useTranslation } from 'react-i18next';
+import { Link, NavLink } from 'react-router-dom';
+import type { Membership } from '../../server/contract/auth';
+import { paths } from '../paths';
+import { KeptLanguageSwitch } from './kept-language-switch';
+import { landingOf } from './landing';
+import { Mark } from './mark';
+import { PersonMenu } from './person-menu';
+
+interface Props {
+  member: Membership;
+  children: ReactNode;
+}
+
+/** Around the pages of the producer's people: sections at the left, or along the bottom of a phone. */
+export function StaffLayout({ member, children }: Props) {
+  return (
+    <div className="min-h-dvh lg:grid lg:grid-cols-[196px_minmax(0,1fr)]">
+      <header className="flex items-center justify-between gap-3 border-b border-rule bg-surface px-4 py-2.5 lg:sticky lg:top-0 lg:h-dvh lg:flex-col lg:items-stretch lg:justify-start lg:border-r lg:border-b-0 lg:px-3.5 lg:py-5">
+        <Link to={landingOf(member)} className="rounded-control lg:px-2 lg:pb-3">
+          <Mark />
+        </Link>
+        <Sections slug={member.producer.slug} />
+        <div className="flex items-center gap-2 lg:mt-auto lg:flex-col lg:items-start lg:gap-3 lg:px-2">
+          <p className="hidden text-small text-ink-3 lg:block">{member.producer.name}</p>
+          <KeptLanguageSwitch />
+          <PersonMenu upward />
+        </div>
+      </header>
+      <main id="main" tabIndex={-1} className="min-w-0 pb-20 outline-none lg:pb-0">
+        {children}
+      </main>
+    </div>
+  );
+}
+
+const sections: { key: 'stores' | 'service'; Icon: LucideIcon; to: (slug: string) => string }[] = [
+  { key: 'stores', Icon: Store, to: (slug) => paths.stores(slug) },
+  { key: 'service', Icon: MessagesSquare, to: (slug) => paths.requests(slug) },
+];
+
+function Sections({ slug }: { slug: string }) {
+  const { t } = useTranslation();
+  return (
+    <nav
+      aria-label={t('nav.label')}
+      className="fixed inset-x-0 bottom-0 z-30 grid auto-cols-fr grid-flow-col border-t border-rule bg-surface pb-[env(safe-area-inset-bottom)] lg:static lg:flex lg:flex-col lg:gap-0.5 lg:border-0 lg:pb-0"
+    >
+      {sections.map(({ key, Icon, to }) => (
+        <NavLink
+          key={key}
+          to={to(slug)}
+          className="flex min-h-14 flex-col items-center justify-center gap-0.5 text-small font-semibold text-ink-2 aria-[current=page]:bg-fjord-tint aria-[current=page]:text-fjord lg:min-h-10 lg:flex-row lg:justify-start lg:gap-2.5 lg:rounded-control lg:px-2.5 lg:text-body"
+        >
+          <Icon aria-hidden size={18} strokeWidth={1.8} />
+          {t(`nav.${key}`)}
+        </NavLink>
+      ))}
+    </nav>
+  );
+}
