@@ -55,6 +55,7 @@ if (!made) {
   process.exit(1);
 }
 console.log(`${parsed.data.name} is at /${parsed.data.slug}; ${parsed.data.adminEmail} can ask for a sign-in link now.`);
+console.log(`Telemetry key, shown only here: ${made.telemetryKey}`);
 
 function isTimeZone(zone: string): boolean {
   try {

@@ -48,6 +48,7 @@ export type Standing =
   | { kind: 'runs-out-first'; runOut: LaneRunOut }
   | { kind: 'may-run-out-first'; runOut: LaneRunOut }
   | { kind: 'truck-first'; runOut: LaneRunOut }
+  /** No truck is known to come before. */
   | { kind: 'runs-out'; runOut: LaneRunOut }
   /** `past` is the last local day with ice on it, null where it keeps beyond the horizon. */
   | { kind: 'keeps'; past: string | null }
@@ -55,7 +56,7 @@ export type Standing =
 
 /**
  * Where a freezer stands at `now`, for a store in `zone` whose next truck, if any, comes in `truck`.
- * A truck past its window counts as not there yet.
+ * A truck past its window is no promise: nobody knows when it comes.
  */
 export function standingOf(freezer: FreezerNow, truck: Window | null, now: number, zone: string): Standing {
   const { state } = freezer;
@@ -78,10 +79,10 @@ function againstTruck(runOut: LaneRunOut | null, truck: Window | null, now: numb
   if (!runOut) return { kind: 'keeps', past: null };
   if (runOut.likely <= now) return { kind: 'perhaps-empty', runOut };
   const soonest = runOut.early ?? runOut.likely;
-  const arrival = truck && Math.max(truck.to, now);
+  const arrival = truck && truck.to >= now ? truck.to : null;
   if (arrival && runOut.likely < arrival) return { kind: 'runs-out-first', runOut };
   if (arrival && soonest < arrival) return { kind: 'may-run-out-first', runOut };
   const past = addDays(dayOf(soonest, zone), -1);
   if (past >= addDays(dayOf(now, zone), keepsAfterDays)) return { kind: 'keeps', past };
-  return { kind: truck ? 'truck-first' : 'runs-out', runOut };
+  return { kind: arrival ? 'truck-first' : 'runs-out', runOut };
 }

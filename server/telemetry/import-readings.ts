@@ -33,8 +33,11 @@ export function importReadings(db: Database, door: ReadingDoor, producerId: stri
   }
   for (const one of quarantined) keepAside(scoped, door.now(), one);
   for (const sensorId of changed) refreshFreezerOf(db, scoped, sensorId);
-  return { accepted, duplicate: sorted.length - accepted, quarantined: quarantined.length };
+  return { accepted, duplicate: sorted.length - accepted, quarantined: distinct(quarantined) };
 }
+
+/** A reading with several faults is one reading. */
+const distinct = (quarantined: Quarantined[]): number => new Set(quarantined.map(({ device, at }) => `${device} ${at}`)).size;
 
 /** A serial not heard before becomes an unclaimed sensor of this producer, whoever else may own one of that name. */
 function sensorOf(db: ProducerDb, door: ReadingDoor, serial: string): { id: string; no: number } {

@@ -3,6 +3,7 @@ import { abilityFor } from '../../contract/ability';
 import { memberships, people, producerDb, producers } from '../../db';
 import type { Services } from '../../http/context';
 import { runAction } from '../../http/run-action';
+import { newTelemetryKey } from '../telemetry/new-key';
 
 export interface NewProducer {
   name: string;
@@ -14,8 +15,14 @@ export interface NewProducer {
   adminEmail: string;
 }
 
-/** Creates a tenant with its first admin. Answers its id, or null when the slug is taken. */
-export function createProducer(services: Services, wanted: NewProducer): string | null {
+export interface MadeProducer {
+  producerId: string;
+  /** Shown once; only its hash is kept. */
+  telemetryKey: string;
+}
+
+/** Creates a tenant with its first admin and first telemetry key. Answers null when the slug is taken. */
+export function createProducer(services: Services, wanted: NewProducer): MadeProducer | null {
   const { db, system, newId, now } = services;
   const at = now();
   if (system.producerBySlug(wanted.slug)) return null;
@@ -28,10 +35,11 @@ export function createProducer(services: Services, wanted: NewProducer): string 
     db.insert(people).values({ id: personId, email: adminEmail, name: adminName, language, createdAt: at }).onConflictDoNothing().run();
     producerDb(db, producerId).insert(memberships, { id: membershipId, personId, role: 'producer-admin', side: 'producer', createdAt: at });
     const viewer = { personId, membershipId, role: 'producer-admin' as const, side: 'producer' as const, storeIds: [], grants: [] };
-    runAction(services, { producerId, id: 'operator', ability: abilityFor(viewer) }, 'create-producer', at, (tx) => {
+    const telemetryKey = runAction(services, { producerId, id: 'operator', ability: abilityFor(viewer) }, 'create-producer', at, (tx) => {
       tx.authorise('create', 'Settings', {});
       tx.audit('Settings', producerId, { slug });
+      return newTelemetryKey(tx, newId(), 'first source', at);
     });
-    return producerId;
+    return { producerId, telemetryKey };
   })();
 }

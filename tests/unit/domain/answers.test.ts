@@ -41,7 +41,7 @@ describe('Full?', () => {
   it('does not count on a truck that is past its window', () => {
     const soon = state({ laneRunOuts: [{ early: now + hour, likely: now + 2 * hour, late: now + 3 * hour }] });
     const late = { ...today, to: now - 30 * minute };
-    expect(full({ freezers: [freezer({ state: soon })], nextTruck: late }).said.key).toBe('may-run-out-first'.replace('may-run-out', 'truck'));
+    expect(full({ freezers: [freezer({ state: soon })], nextTruck: late }).said.key).toBe('runs-out');
   });
 
   it('says no day of running out within 14 days as keeping on', () => {

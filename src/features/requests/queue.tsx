@@ -1,0 +1,111 @@
+import { useRef } from 'react';
+import { useTranslation } from 'react-i18next';
+import { Outlet, useNavigate, useParams, useSearchParams } from 'react-router-dom';
+import type { QueryInput } from '../../../server/contract/endpoint';
+import { api } from '../../../server/contract/index';
+import type { RequestSummary } from '../../../server/contract/requests';
+import { page, type Place } from '../../api/page';
+import { q } from '../../api/query';
+import { PageTitle } from '../../layouts/page-title';
+import { useMembership } from '../../lib/me';
+import { paths } from '../../paths';
+import { Pager } from '../../table/pager';
+import { QueueFilters } from './queue-filters';
+import { QueueKeys } from './queue-keys';
+import { QueueRow } from './queue-row';
+
+const EVERY = 30_000;
+
+export const queue = page({
+  words: ['requests'],
+  queries: (place) => ({
+    list: q(api.requests.list, { params: { producer: place.params.producer ?? '' }, query: queryOf(place) }, { everyMs: EVERY }),
+  }),
+  View: Queue,
+});
+
+interface Props {
+  list: { requests: RequestSummary[]; next: string | null };
+}
+
+/** The requests at the left, the one picked beside them; on a phone one of the two. */
+function Queue({ list }: Props) {
+  const { requestId } = useParams();
+  const { side } = useMembership();
+  // A store's people come from their store's page and see one request whole.
+  if (requestId && side === 'store') return <Outlet />;
+  return (
+    <div className="lg:grid lg:grid-cols-[minmax(300px,340px)_minmax(0,1fr)]">
+      <ListPane list={list} open={requestId} />
+      <div className={requestId ? '' : 'hidden lg:block'}>{requestId ? <Outlet /> : <Pick />}</div>
+    </div>
+  );
+}
+
+function ListPane({ list, open }: Props & { open: string | undefined }) {
+  const { t } = useTranslation('requests');
+  const { side } = useMembership();
+  const searchRef = useRef<HTMLInputElement>(null);
+  const title = side === 'store' ? t('title-store') : t('title');
+  return (
+    <section
+      aria-label={t('list.label')}
+      className={`${open ? 'hidden lg:block' : ''} lg:sticky lg:top-0 lg:h-dvh lg:overflow-y-auto lg:border-r lg:border-rule`}
+    >
+      {!open && <PageTitle title={title} />}
+      <h1 className="px-4 pt-5 pb-3 text-heading font-bold lg:pt-6">{title}</h1>
+      <QueueFilters searchRef={searchRef} />
+      <Rows requests={list.requests} open={open} />
+      <div className="px-4">
+        <Pager next={list.next} />
+      </div>
+      <Keys open={open} searchRef={searchRef} />
+    </section>
+  );
+}
+
+function Rows({ requests, open }: { requests: RequestSummary[]; open: string | undefined }) {
+  const { t } = useTranslation('requests');
+  const { side } = useMembership();
+  const [search] = useSearchParams();
+  if (requests.length > 0) {
+    return (
+      <ul className="border-t border-rule">
+        {requests.map((request) => (
+          <QueueRow key={request.id} request={request} picked={request.id === open} />
+        ))}
+      </ul>
+    );
+  }
+  const empty = side === 'store' ? t('list.empty-store') : t('list.empty');
+  return <p className="px-4 py-8 text-ink-2">{search.size > 0 ? t('list.nothing') : empty}</p>;
+}
+
+function Keys({ open, searchRef }: { open: string | undefined; searchRef: React.RefObject<HTMLInputElement | null> }) {
+  const { producer } = useMembership();
+  const navigate = useNavigate();
+  const [search] = useSearchParams();
+  const close = () => void navigate(paths.requests(producer.slug, search.size > 0 ? `?${search}` : ''), { state: { keepFocus: true } });
+  return <QueueKeys searchRef={searchRef} close={open ? close : undefined} />;
+}
+
+function Pick() {
+  const { t } = useTranslation('requests');
+  return (
+    <div className="grid h-full place-content-center gap-1 p-10 text-center text-ink-3">
+      <p>{t('list.pick')}</p>
+      <p className="text-small">{t('list.keys')}</p>
+    </div>
+  );
+}
+
+const filterNames = ['state', 'kind', 'assignee', 'store', 'q', 'after'] as const;
+
+/** A filter the contract does not know is left out rather than refused: links are typed and shortened by people. */
+function queryOf({ search }: Place): QueryInput<typeof api.requests.list> {
+  const wanted = Object.fromEntries(filterNames.flatMap((name) => (search.get(name) ? [[name, search.get(name)]] : [])));
+  const parsed = api.requests.list.query.safeParse(wanted);
+  if (parsed.success) return wanted;
+  const wrong = new Set(parsed.error.issues.map((issue) => String(issue.path[0])));
+  return Object.fromEntries(Object.entries(wanted).filter(([name]) => !wrong.has(name)));
+}

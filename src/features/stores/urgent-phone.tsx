@@ -1,0 +1,23 @@
+import { Phone } from 'lucide-react';
+import { useTranslation } from 'react-i18next';
+import type { Answers } from '../../../server/domain/answers';
+import { useMembership } from '../../lib/me';
+
+/** The producer's urgent phone, only where something cannot wait for a form. */
+export function UrgentPhone({ answers }: { answers: Answers }) {
+  const { t } = useTranslation('store');
+  const { name, urgentPhone } = useMembership().producer;
+  if (!isUrgent(answers) || !urgentPhone) return null;
+  return (
+    <a
+      href={`tel:${urgentPhone.replace(/[^+\d]/g, '')}`}
+      className="mt-3 flex min-h-12 items-center gap-2.5 rounded-card border border-rust bg-rust-tint px-5 py-2.5 font-semibold text-rust"
+    >
+      <Phone aria-hidden size={20} className="shrink-0" />
+      {t('freezer.urgent', { producer: name, phone: urgentPhone })}
+    </a>
+  );
+}
+
+const isUrgent = ({ full, cold, coming }: Answers): boolean =>
+  cold.said.key === 'warm' || full.said.key === 'empty' || coming.said.key === 'late' || coming.said.key === 'missed';

@@ -1,0 +1,37 @@
+import { useTranslation } from 'react-i18next';
+import { Link, useSearchParams } from 'react-router-dom';
+
+interface Props {
+  /** The cursor of the page that follows; null on the last. */
+  next: string | null;
+}
+
+/** Keyset paging by links: on to the next page, or back to the first. */
+export function Pager({ next }: Props) {
+  const { t } = useTranslation();
+  const [search] = useSearchParams();
+  const to = (after: string | null) => {
+    const wanted = new URLSearchParams(search);
+    wanted.delete('after');
+    if (after) wanted.set('after', after);
+    return { search: wanted.toString() };
+  };
+  const later = search.has('after');
+  if (!next && !later) return null;
+  return (
+    <div className="flex gap-4 py-4">
+      {later && (
+        <Link to={to(null)} className={link}>
+          {t('first')}
+        </Link>
+      )}
+      {next && (
+        <Link to={to(next)} className={link}>
+          {t('next')}
+        </Link>
+      )}
+    </div>
+  );
+}
+
+const link = 'inline-flex min-h-11 items-center font-semibold text-fjord underline underline-offset-4';
