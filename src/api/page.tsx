@@ -1,6 +1,7 @@
 import { useSuspenseQueries, type FetchQueryOptions, type UseSuspenseQueryOptions } from '@tanstack/react-query';
-import type { ComponentType } from 'react';
+import type { ComponentType, JSX } from 'react';
 import { useParams, useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
+import { fetchWords } from '../lib/i18n';
 import { queryClient } from './query';
 
 /** Where a page stands: the path's names and the filters in the URL. */
@@ -15,17 +16,21 @@ interface AnyOptions {
 }
 type Data<O> = O extends { queryFn?: infer F } ? (F extends (...context: never[]) => infer R ? Awaited<R> : never) : never;
 export type Answers<Q> = { [Name in keyof Q]: Data<Q[Name]> };
+// Until the queries' names are inferred nothing is known of the view, which any view fits.
+type Shown<Q> = string extends keyof Q ? never : Answers<Q> & { place: Place };
 
 interface Page<Q extends Record<string, AnyOptions>> {
+  /** The nouns of `locales/` that the view speaks in, fetched beside its answers. */
+  words?: string[];
   queries: (place: Place) => Q;
-  View: ComponentType<Answers<Q> & { place: Place }>;
+  View: ComponentType<Shown<NoInfer<Q>>>;
 }
 
 /** A lazy route whose loader awaits exactly what its view receives. */
-export function page<Q extends Record<string, AnyOptions>>({ queries, View }: Page<Q>) {
+export function page<Q extends Record<string, AnyOptions>>({ words = [], queries, View }: Page<Q>) {
   const loader = async ({ params, request }: LoaderFunctionArgs) => {
     const wanted = Object.values(queries({ params: named(params), search: new URL(request.url).searchParams }));
-    await Promise.all(wanted.map((options) => queryClient.ensureQueryData(options as FetchQueryOptions)));
+    await Promise.all([...wanted.map((options) => queryClient.ensureQueryData(options as FetchQueryOptions)), fetchWords(words)]);
     return null;
   };
 
@@ -36,8 +41,9 @@ export function page<Q extends Record<string, AnyOptions>>({ queries, View }: Pa
     const wanted = Object.entries(queries(place));
     const answers = useSuspenseQueries({ queries: wanted.map(([, options]) => options as UseSuspenseQueryOptions) });
     // Names and answers keep their order, which the types cannot say.
-    const data = Object.fromEntries(wanted.map(([name], i) => [name, answers[i]?.data])) as Answers<Q>;
-    return <View {...data} place={place} />;
+    const data = Object.fromEntries(wanted.map(([name], i) => [name, answers[i]?.data]));
+    const shown = { ...data, place } as unknown as Shown<NoInfer<Q>> & JSX.IntrinsicAttributes;
+    return <View {...shown} />;
   }
 
   return { loader, Component };

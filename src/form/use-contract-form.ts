@@ -13,6 +13,8 @@ type Sent<E> = Body<E> extends FieldValues ? Body<E> : never;
 
 interface Options<E extends WithBody> {
   start: DefaultValues<Values<E>>;
+  /** Where the fields follow something that may change under the person's hand; what they touched stays. */
+  values?: Values<E>;
   /** The whole question to the server around the checked body. */
   input: (body: Sent<E>) => Input<E>;
   /** Which answers the change makes stale. */
@@ -36,8 +38,10 @@ export function useContractForm<const E extends WithBody>(endpoint: E, options: 
   const [problem, setProblem] = useState<Problem | null>(null);
   const fields = useForm<Values<E>, unknown, Sent<E>>({
     defaultValues: options.start,
+    values: options.values,
+    resetOptions: { keepDirtyValues: true },
     // The endpoint's types and its schema say the same; the resolver's generics cannot follow a conditional type.
-    resolver: standardSchemaResolver(endpoint.body) as unknown as Resolver<Values<E>, unknown, Sent<E>>,
+    resolver: standardSchemaResolver(endpoint.body as Parameters<typeof standardSchemaResolver>[0]) as unknown as Resolver<Values<E>, unknown, Sent<E>>,
   });
   const typed = useTyped(fields.formState.isDirty && options.guarded !== false);
 
@@ -46,7 +50,7 @@ export function useContractForm<const E extends WithBody>(endpoint: E, options: 
     try {
       const result = await act.mutateAsync(options.input(body));
       typed.release();
-      fields.reset(options.start);
+      fields.reset(undefined, { keepDirtyValues: false });
       options.onDone?.(result, body);
     } catch (error) {
       refused(error as Problem);

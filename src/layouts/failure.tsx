@@ -8,8 +8,19 @@ import { paths } from '../paths';
 import { PageTitle } from './page-title';
 
 /** What a page shows when it cannot be shown: nothing here, not allowed, no connection, or our own fault. */
-export function Failure() {
-  const problem = problemOf(useRouteError());
+export const Failure = () => <FailureOf problem={problemOf(useRouteError())} />;
+
+/** The same where no layout stands around it. */
+export const FailurePage = () => (
+  <main id="main" tabIndex={-1} className="outline-none">
+    <Failure />
+  </main>
+);
+
+/** A path that leads nowhere. */
+export const NotFound = () => <FailureOf problem={new Problem('not-found', 404)} />;
+
+function FailureOf({ problem }: { problem: Problem }) {
   const { t } = useTranslation(['problems', 'common']);
   const title = t(`${problem.type}.title`);
   return (
@@ -22,17 +33,6 @@ export function Failure() {
       {problem.requestId && <p className="w-full text-small text-ink-3">{t('common:failed.reference', { id: problem.requestId })}</p>}
     </FailureFrame>
   );
-}
-
-/** The same where no layout stands around it. */
-export const FailurePage = () => (
-  <main id="main" tabIndex={-1} className="outline-none">
-    <Failure />
-  </main>
-);
-
-export function NotFound(): never {
-  throw new Problem('not-found', 404);
 }
 
 function WhatNow({ problem }: { problem: Problem }) {

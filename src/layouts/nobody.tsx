@@ -2,6 +2,7 @@ import { useTranslation } from 'react-i18next';
 import { Outlet } from 'react-router-dom';
 import { useMe } from '../lib/me';
 import { FailureFrame } from './failure';
+import { KeptLanguageSwitch } from './kept-language-switch';
 import { Mark } from './mark';
 import { PersonMenu } from './person-menu';
 
@@ -11,7 +12,10 @@ export function NobodyLayout() {
     <>
       <header className="flex items-center justify-between px-4 py-3 sm:px-6">
         <Mark />
-        <PersonMenu />
+        <div className="flex items-center gap-2">
+          <KeptLanguageSwitch />
+          <PersonMenu />
+        </div>
       </header>
       <main id="main" tabIndex={-1} className="px-4 outline-none">
         <Outlet />

@@ -36,6 +36,12 @@ let started: Promise<void> | undefined;
 /** Once, before the first drawing; whoever comes later waits for the same. */
 export const startLanguage = (): Promise<void> => (started ??= start());
 
+/** Fetches the words of these nouns, so that a page is not drawn without them. */
+export async function fetchWords(nouns: string[]) {
+  await startLanguage();
+  await i18next.loadNamespaces(nouns);
+}
+
 async function start() {
   const language = firstLanguage();
   document.documentElement.lang = language;

@@ -48,11 +48,13 @@ export function magicLink(services: Services) {
     },
     async (req: Request) => claimByToken(services, req.body?.token),
   );
-  passport.use(strategy);
+  // Its own registry: the library's shared one would mix two servers in one process.
+  const authenticator = new passport.Passport();
+  authenticator.use(strategy);
 
   const run = (action: 'requestToken' | 'acceptToken', req: Request, res: Response) =>
     new Promise<Claimed | undefined>((resolve, reject) => {
-      passport.authenticate(strategy.name, { action, session: false, allowReuse: true }, (error: unknown, found?: Claimed | false) =>
+      authenticator.authenticate(strategy.name, { action, session: false, allowReuse: true }, (error: unknown, found?: Claimed | false) =>
         error ? reject(error instanceof Error ? error : new Error('sign-in failed')) : resolve(found || undefined),
       )(req, res, () => resolve(undefined));
     });
@@ -69,6 +71,8 @@ export function magicLink(services: Services) {
 
     /** The person whose link this browser may use; each way it cannot be is its own problem. */
     async accept(req: Request, res: Response, given: { token?: string; code?: string }): Promise<string> {
+      // Without either, having asked would be enough to be let in.
+      if (!given.token && !given.code) throw problem('bad-input', undefined, [{ pointer: '/code', fault: 'required' }]);
       const now = services.now();
       const asker = askerCookieOf(req);
       const link = given.token

@@ -27,13 +27,13 @@ export const requestsRoutes = [
     return { requests: page.rows, next: page.next };
   }),
 
-  route(api.requests.file, (ctx, { body }) => whole(ctx, fileRequest(ctx, body))),
+  route(api.requests.file, (ctx, { body }) => written(ctx, fileRequest(ctx, body))),
 
   route(api.requests.read, (ctx, { params }) => whole(ctx, params.requestId)),
 
   route(api.requests.change, (ctx, { params, body }) => {
     changeRequest(ctx, params.requestId, body);
-    return whole(ctx, params.requestId);
+    return written(ctx, params.requestId);
   }),
 
   route(api.requests.cancel, (ctx, { params }) => {
@@ -72,8 +72,12 @@ export const requestsRoutes = [
   })),
 ];
 
-function whole({ db, ability }: ProducerContext, id: string): Request {
-  const where = and(eq(requests.id, id), readableRequests(ability));
+const whole = (ctx: ProducerContext, id: string): Request => present(ctx, and(eq(requests.id, id), readableRequests(ctx.ability)));
+
+/** As one's own act left it: a technician may file, or give away, what they then no longer see. */
+const written = (ctx: ProducerContext, id: string): Request => present(ctx, eq(requests.id, id));
+
+function present({ db, ability }: ProducerContext, where: SQL | undefined): Request {
   const found = where && requestView(db, where, (request) => ability.can('read', row('Note', ruled(request))));
   if (!found) throw problem('not-found');
   return found;

@@ -1,3 +1,4 @@
+import { row, type Ability } from '../../contract/ability';
 import { api } from '../../contract';
 import type { Attention } from '../../contract/stores';
 import { allowed, and, gte, lt, nextTrucks, or, sql, stores, type SQL } from '../../db';
@@ -20,20 +21,22 @@ export const storesRoutes = [
       cursor ? sql`(${stores.name}, ${stores.id}) > (${cursor[0]}, ${cursor[1]})` : undefined,
       query.q ? matches(query.q) : undefined,
       query.truck ? truckIs(query.truck, now, producer.timeZone) : undefined,
+      query.truck ? allowed(ability, 'read', 'NextTruck', { storeId: stores.id }) : undefined,
     );
-    const page = pageOf(storesView(db, where ?? sql`1`, limit + 1), limit, (row) => [row.name, row.id]);
-    return { stores: page.rows.map((row) => summary(row, now)), next: page.next };
+    const page = pageOf(storesView(db, where ?? sql`1`, limit + 1), limit, ({ name, id }) => [name, id]);
+    return { stores: page.rows.map((store) => summary(store, ability, now)), next: page.next };
   }),
 
   route(api.stores.read, ({ db, ability, now }, { params }) => {
     const store = storeView(db, ability, params.storeId);
     if (!store) throw problem('not-found');
+    const sees = (type: 'NextTruck' | 'Delivery') => ability.can('read', row(type, { storeId: store.id }));
     return {
       store,
       freezers: freezersOfStore(db, store.id),
-      nextTruck: nextTruckOfStore(db, store.id),
+      nextTruck: sees('NextTruck') ? nextTruckOfStore(db, store.id) : null,
       requests: recentRequestsOfStore(db, ability, store.id, now),
-      deliveries: deliveriesOfStore(db, store.id, null, 5),
+      deliveries: sees('Delivery') ? deliveriesOfStore(db, store.id, null, 5) : [],
     };
   }),
 ];
@@ -52,9 +55,9 @@ function truckIs(when: 'today' | 'late' | 'none', now: number, timeZone: string)
   return hasTruck(within ?? sql`0`);
 }
 
-function summary(row: StoreRow, now: number) {
-  const { truckFrom, truckTo, freezers, ...store } = row;
-  const nextTruck = truckFrom !== null && truckTo !== null ? { from: truckFrom, to: truckTo } : null;
+function summary({ truckFrom, truckTo, freezers, ...store }: StoreRow, ability: Ability, now: number) {
+  const seesTruck = ability.can('read', row('NextTruck', { storeId: store.id }));
+  const nextTruck = seesTruck && truckFrom !== null && truckTo !== null ? { from: truckFrom, to: truckTo } : null;
   const levels = freezers.filter((freezer) => freezer.share !== null && freezer.at !== null);
   const pounds = total(levels.map((level) => level.pounds));
   const attention: Attention = attentionOf(freezers, nextTruck, now);

@@ -50,10 +50,14 @@ export function Change({ request }: { request: Request }) {
       <Form form={form} done={saved && !isDirty ? t('change.saved') : undefined}>
         {form.problem?.type === 'request-changed' && <WhatChanged now={seen} look={() => void look()} looked={looked} />}
         <AssigneeField request={seen} />
-        <SelectField name="state" label={t('change.state')} empty={t('change.keep', { state: t(`states.${seen.state}`) })} none={undefined}>
-          {steps.filter((step) => nextSteps(seen.state).includes(step)).map((step) => ({ value: step, label: t(`states.${step}`) }))}
-        </SelectField>
-        {scheduled && <TextField name="scheduledDay" type="date" label={t('change.day')} none={undefined} />}
+        <SelectField
+          name="state"
+          label={t('change.state')}
+          empty={t('change.keep', { state: t(`states.${seen.state}`) })}
+          none={{ value: undefined }}
+          options={steps.filter((step) => nextSteps(seen.state).includes(step)).map((step) => ({ value: step, label: t(`states.${step}`) }))}
+        />
+        {scheduled && <TextField name="scheduledDay" type="date" label={t('change.day')} none={{ value: undefined }} />}
         <SubmitButton>{t('change.save')}</SubmitButton>
       </Form>
     </section>
@@ -78,9 +82,13 @@ function AssigneeField({ request }: { request: Request }) {
   // Whoever has it stays to be seen, even after their role changed.
   const people = now && !known.some(({ id }) => id === now.id) ? [now, ...known] : known;
   return (
-    <SelectField name="assigneeId" label={t('change.assignee')} empty={t('change.nobody')} none={null}>
-      {people.map(({ id, name }) => ({ value: id, label: name }))}
-    </SelectField>
+    <SelectField
+      name="assigneeId"
+      label={t('change.assignee')}
+      empty={t('change.nobody')}
+      none={{ value: null }}
+      options={people.map(({ id, name }) => ({ value: id, label: name }))}
+    />
   );
 }
 

@@ -6,8 +6,14 @@ import { useMembership } from '../../lib/me';
 import { useFormat } from '../../lib/use-format';
 import { paths } from '../../paths';
 
+interface Props {
+  request: Request;
+  /** False where the form beside it says who has it. */
+  assignee: boolean;
+}
+
 /** Where it is, who has it and when somebody comes. */
-export function Facts({ request }: { request: Request }) {
+export function Facts({ request, assignee }: Props) {
   const { t } = useTranslation('requests');
   const { producer } = useMembership();
   const format = useFormat();
@@ -19,7 +25,7 @@ export function Facts({ request }: { request: Request }) {
         </Link>
       </Fact>
       <Fact name={t('one.freezer')}>{request.freezer ?? t('one.whole-store')}</Fact>
-      <Fact name={t('one.assignee')}>{request.assignee?.name ?? t('list.unassigned')}</Fact>
+      {assignee && <Fact name={t('one.assignee')}>{request.assignee?.name ?? t('list.unassigned')}</Fact>}
       {request.scheduledDay && <Fact name={t('one.visit')}>{format.day(request.scheduledDay)}</Fact>}
     </dl>
   );

@@ -26,7 +26,7 @@ export function RequestHead({ request }: { request: Request }) {
       {side === 'store' && <p className="mt-3 font-semibold">{t(`one.told.${request.state}`, { day })}</p>}
       <section className="mt-5 border-t border-rule pt-4">
         <p className="text-small text-ink-3">
-          {t('one.opened-by', { name: request.openedBy.name, when: format.when(request.openedAt) })}
+          {t('one.opened-by', { name: request.openedBy?.name ?? t('entries.nilas'), when: format.when(request.openedAt) })}
           {side === 'producer' && ` · ${t(`one.store-language.${request.language}`)}`}
         </p>
         {request.words ? (

@@ -36,11 +36,12 @@ export const requestPage = page({
 /** One request for both sides: each sees what its rules let it do. */
 function RequestView({ request }: { request: Request }) {
   const { t } = useTranslation('requests');
+  const { side } = useMembership();
   const may = useMay(request);
   const fresh = useFresh(request);
   const title = `${t('number', { number: request.number })} ${t(`kinds.${request.kind}`)}`;
   return (
-    <article className="bg-surface lg:min-h-dvh xl:grid xl:grid-cols-[minmax(0,1fr)_300px]">
+    <article className={`bg-surface xl:grid xl:grid-cols-[minmax(0,1fr)_300px] ${side === 'store' ? 'overflow-hidden rounded-card border border-rule' : 'lg:min-h-dvh'}`}>
       <PageTitle title={title} />
       <div className="min-w-0 px-4 py-5 sm:px-7 lg:py-6">
         <Back request={request} />
@@ -53,7 +54,7 @@ function RequestView({ request }: { request: Request }) {
       </div>
       <aside className="border-t border-rule bg-paper px-4 py-5 sm:px-6 xl:border-t-0 xl:border-l">
         {may.change && <Change request={request} />}
-        <Facts request={request} />
+        <Facts request={request} assignee={!may.change} />
       </aside>
     </article>
   );

@@ -1,12 +1,15 @@
 import { useTranslation } from 'react-i18next';
 import { useNavigate } from 'react-router-dom';
 import type { StorePage } from '../../../server/contract/stores';
+import { truckToCome } from '../../../server/domain/answers';
 import { page, type Place } from '../../api/page';
 import { PageTitle } from '../../layouts/page-title';
 import { FiledReport } from './filed-report';
 import { RequestForm } from './request-form';
 import { StoreFrame } from './store-frame';
+import { knownOf } from './store-known';
 import { storeQuery } from './store-query';
+import { useNow } from './use-now';
 import { useStoreWords } from './use-store-words';
 
 export const askForIcePage = page({ queries: (place) => ({ found: storeQuery(place) }), View: AskForIce });
@@ -45,7 +48,7 @@ function AskForIce({ found, place }: Props) {
 
 function Planned({ found }: { found: StorePage }) {
   const { t } = useTranslation('report');
-  const say = useStoreWords(found.store.timeZone);
-  const truck = found.nextTruck;
+  const say = useStoreWords(found.store.timeZone, useNow());
+  const truck = truckToCome(knownOf(found));
   return <p className="mt-1 text-ink-2">{truck ? t('sooner.words-told', { when: say.dayAndWindow(truck) }) : t('sooner.none-told')}</p>;
 }

@@ -10,7 +10,7 @@ import { storeQuery } from './store-query';
 export function ConnectionNote({ place, now }: { place: Place; now: number }) {
   const { t } = useTranslation('store');
   const { data, dataUpdatedAt, isRefetchError } = useQuery(storeQuery(place));
-  const say = useStoreWords(data?.store.timeZone ?? 'UTC');
+  const say = useStoreWords(data?.store.timeZone ?? 'UTC', now);
   const online = useOnline();
   const cut = !online || isRefetchError;
   return (
@@ -18,7 +18,7 @@ export function ConnectionNote({ place, now }: { place: Place; now: number }) {
       {cut && (
         <p className="flex items-center gap-2 rounded-control border border-straw bg-straw-tint px-4 py-2.5 text-body font-semibold text-straw">
           <WifiOff aria-hidden size={18} className="shrink-0" />
-          {t(online ? 'unreached' : 'offline', { ago: say.ago(dataUpdatedAt, now) })}
+          {t(online ? 'unreached' : 'offline', { ago: say.ago(dataUpdatedAt) })}
         </p>
       )}
     </div>

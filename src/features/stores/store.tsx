@@ -9,6 +9,7 @@ import { FreezerCard } from './freezer-card';
 import { usePagePadding } from './store-frame';
 import { StoreActions } from './store-actions';
 import { StoreDeliveries } from './store-deliveries';
+import { knownOf } from './store-known';
 import { storeQuery } from './store-query';
 import { StoreRequests } from './store-requests';
 import { UrgentPhone } from './urgent-phone';
@@ -25,7 +26,7 @@ interface Props {
 function StoreView({ found, place }: Props) {
   const now = useNow();
   const { store } = found;
-  const answers = answersFor({ ...found, timeZone: store.timeZone, deliveryDays: store.deliveryDays }, now);
+  const answers = answersFor(knownOf(found), now);
   return (
     <div className={`${usePagePadding()} pb-24 lg:pb-8`}>
       <PageTitle title={store.name} />

@@ -1,0 +1,105 @@
+import type { Reading } from './types';
+
+/**
+ * The readings of one freezer in order of time, each moment once. Two words about one moment merge by the cautious
+ * value (larger distance, warmer air, weaker supply), so the result depends on the set of readings alone.
+ */
+export function orderedReadings(readings: Reading[]): Reading[] {
+  const byTime = new Map<number, Reading>();
+  for (const reading of readings) {
+    const known = byTime.get(reading.at);
+    byTime.set(reading.at, known ? merged(known, reading) : reading);
+  }
+  return [...byTime.values()].sort((a, b) => a.at - b.at);
+}
+
+function merged(a: Reading, b: Reading): Reading {
+  const length = Math.max(a.distancesIn.length, b.distancesIn.length);
+  return {
+    at: a.at,
+    distancesIn: Array.from({ length }, (_, i) => pick(Math.max, a.distancesIn[i], b.distancesIn[i])),
+    airF: pick(Math.max, a.airF, b.airF),
+    supplyV: pick(Math.min, a.supplyV, b.supplyV),
+  };
+}
+
+const pick = (choose: (a: number, b: number) => number, a: number | null | undefined, b: number | null | undefined): number | null =>
+  a === null || a === undefined ? (b ?? null) : b === null || b === undefined ? a : choose(a, b);
+
+/** Readings looked at on either side of one. */
+const HALF_WINDOW = 3;
+/** A normal sd from the median absolute deviation (Hampel 1974). */
+const MAD_TO_SD = 1.4826;
+const HAMPEL_SD = 3;
+/** Below this (in) nothing is a spike: a leaning bag or the probe's own noise. */
+const LEAST_SPIKE_IN = 1.5;
+/** A probe that was heard within this many readings is still there. */
+const CARRY_READINGS = 6;
+
+/**
+ * Distances by reading and probe with spikes out and short gaps carried over; null where a probe is dead.
+ * Hampel's rule per probe over three readings on either side. At the young end, where less is known, a jump that
+ * several probes make together is believed at once, and one that a lone probe makes waits for a second reading.
+ */
+export function cleanDistances(readings: Reading[], probes: number): (number | null)[][] {
+  const raw = Array.from({ length: probes }, (_, p) => readings.map(({ distancesIn }) => distancesIn[p] ?? null));
+  const odd = raw.map((series) => series.map((_, i) => oddness(series, i)));
+  const clean = raw.map((series, p) =>
+    series.map((value, i) => {
+      const sign = odd[p]?.[i] ?? 0;
+      if (sign === 0) return value;
+      const settled = series.length - 1 - i >= HALF_WINDOW;
+      const together = odd.filter((signs) => signs[i] === sign).length > 1;
+      return !settled && together ? value : null;
+    }),
+  );
+  const carried = clean.map(carryOver);
+  return readings.map((_, i) => carried.map((series) => series[i] ?? null));
+}
+
+/** 1 or -1 where a value stands out from its neighbours above or below, else 0. */
+function oddness(series: (number | null)[], i: number): -1 | 0 | 1 {
+  const value = series[i];
+  if (value === null || value === undefined) return 0;
+  const around = series.slice(Math.max(0, i - HALF_WINDOW), i + HALF_WINDOW + 1).filter((one) => one !== null);
+  if (around.length < 3) return 0;
+  const middle = median(around);
+  const spread = MAD_TO_SD * median(around.map((one) => Math.abs(one - middle)));
+  const off = value - middle;
+  if (Math.abs(off) <= Math.max(LEAST_SPIKE_IN, HAMPEL_SD * spread)) return 0;
+  return off > 0 ? 1 : -1;
+}
+
+function carryOver(series: (number | null)[]): (number | null)[] {
+  let last: number | null = null;
+  let age = 0;
+  return series.map((value) => {
+    age = value === null ? age + 1 : 0;
+    last = value ?? (age <= CARRY_READINGS ? last : null);
+    return last;
+  });
+}
+
+export function median(values: number[]): number {
+  const sorted = [...values].sort((a, b) => a - b);
+  const middle = sorted.length >> 1;
+  return sorted.length % 2 === 1 ? (sorted[middle] ?? NaN) : ((sorted[middle - 1] ?? NaN) + (sorted[middle] ?? NaN)) / 2;
+}
+
+/**
+ * The non-increasing sequence nearest to `values` in weighted squares, by pooling adjacent violators.
+ * Source: Barlow, Bartholomew, Bremner and Brunk, Statistical Inference under Order Restrictions (1972).
+ */
+export function isotonicNonIncreasing(values: number[], weights: number[] = values.map(() => 1)): number[] {
+  const blocks: { mean: number; weight: number; count: number }[] = [];
+  values.forEach((value, i) => {
+    let block = { mean: value, weight: weights[i] ?? 1, count: 1 };
+    for (let before = blocks.at(-1); before && before.mean < block.mean; before = blocks.at(-1)) {
+      blocks.pop();
+      const weight = before.weight + block.weight;
+      block = { mean: (before.mean * before.weight + block.mean * block.weight) / weight, weight, count: before.count + block.count };
+    }
+    blocks.push(block);
+  });
+  return blocks.flatMap(({ mean, count }) => Array<number>(count).fill(mean));
+}

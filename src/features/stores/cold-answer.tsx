@@ -1,0 +1,59 @@
+import { useTranslation } from 'react-i18next';
+import type { ColdAnswer as Told, ColdSaid } from '../../../server/domain/answers';
+import { AnswerBox, type Tone } from './answer-box';
+import type { Telling } from './answers';
+import { useStoreWords } from './use-store-words';
+
+const tones: Record<ColdSaid['key'], Tone> = {
+  'no-freezers': 'fine',
+  'no-sensor': 'fine',
+  waiting: 'unsure',
+  silent: 'unsure',
+  warm: 'bad',
+  'above-once': 'unsure',
+  holding: 'fine',
+  'holding-some': 'fine',
+};
+
+type Word = 'holding' | 'warm' | 'unsure';
+const words: Partial<Record<ColdSaid['key'], Word>> = { warm: 'warm', 'above-once': 'unsure', holding: 'holding', 'holding-some': 'holding' };
+
+export function ColdAnswer({ answer, zone, now }: Telling & { answer: Told }) {
+  const { t } = useTranslation('store');
+  const say = useStoreWords(zone, now);
+  const { value, said } = answer;
+  const word = words[said.key];
+  return (
+    <AnswerBox
+      question={t('answers.cold.question')}
+      value={value ? say.degrees(value.airF) : t('answers.cold.none')}
+      aside={word && t(`answers.cold.word.${word}`)}
+      tone={tones[said.key]}
+    >
+      <p>
+        <Sentence said={said} zone={zone} now={now} />
+      </p>
+      {value && <p className={value.freshness === 'fresh' ? undefined : 'font-semibold text-straw'}>{t('answers.cold.heard', { ago: say.ago('heard' in said ? said.heard : value.at) })}</p>}
+    </AnswerBox>
+  );
+}
+
+function Sentence({ said, zone, now }: { said: ColdSaid; zone: string; now: number }) {
+  const { t } = useTranslation('store');
+  const say = useStoreWords(zone, now);
+  const key = `answers.cold.said.${said.key}` as const;
+  switch (said.key) {
+    case 'silent':
+      return t(key, { when: say.when(said.heard) });
+    case 'warm':
+      return `${t(key, { freezer: said.freezer, since: say.when(said.since) })} ${said.others > 0 ? t('answers.cold.said.warm-others', { count: said.others }) : ''}`;
+    case 'above-once':
+      return t(key, { freezer: said.freezer });
+    case 'holding':
+      return t(key, { count: said.count, context: said.count === 2 ? 'both' : undefined });
+    case 'holding-some':
+      return t(key, { count: said.count, all: said.count + said.unknown });
+    default:
+      return t(key);
+  }
+}

@@ -1,0 +1,38 @@
+import { useTranslation } from 'react-i18next';
+import type { Freezer } from '../../../server/contract/freezers';
+import { useFormat } from '../../lib/format';
+
+interface Props {
+  freezer: Freezer;
+  state: NonNullable<Freezer['state']>;
+}
+
+/** A lane under this share of full is low. */
+const lowShare = 0.25;
+
+/** How many bags of each size, against a full lane. */
+export function FreezerLanes({ freezer, state }: Props) {
+  const { t } = useTranslation('store');
+  const format = useFormat();
+  return (
+    <ul aria-label={t('freezer.lanes')} className="grid gap-2">
+      {state.level.lanes.map(({ bags, about, pounds, capacityPounds }, i) => {
+        const lane = freezer.lanes[i];
+        const share = capacityPounds > 0 ? Math.min(1, pounds / capacityPounds) : 0;
+        const low = share < lowShare;
+        return (
+          <li key={lane?.productId ?? i} className="grid grid-cols-[3.25rem_minmax(0,1fr)_auto] items-center gap-x-3">
+            <span>{format.pounds(lane?.bagPounds ?? 0)}</span>
+            <span aria-hidden className="h-2 overflow-hidden rounded-full bg-sunk">
+              <span className={`block h-full rounded-full ${low ? 'bg-ember' : 'bg-fjord-2'}`} style={{ width: `${share * 100}%` }} />
+            </span>
+            <span className="min-w-20 text-right">
+              {low && <span className="mr-1.5 font-semibold text-ember">{t('freezer.low')}</span>}
+              {t(about ? 'freezer.bags-about' : 'freezer.bags', { count: bags, bags: format.number(bags) })}
+            </span>
+          </li>
+        );
+      })}
+    </ul>
+  );
+}

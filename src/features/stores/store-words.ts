@@ -1,0 +1,51 @@
+import type { TFunction } from 'i18next';
+import type { Weekday } from '../../../server/contract/words';
+import { addDays, dayOf } from '../../../server/domain/civil';
+import type { Window } from '../../../server/domain/freezer-standing';
+import type { Format } from '../../lib/format';
+
+const hour = 3_600_000;
+/** Hours after midnight that people still call the night before (common practice, no published source). */
+const nightHours = 5;
+
+/** How the store's sentences speak of days, beside what the application's formats give. */
+export function storeWords(t: TFunction<'store'>, format: Format, now: number) {
+  const zone = format.timeZone;
+  const today = dayOf(now, zone);
+
+  /** "today", "Thursday", and from a week on "Dec 10", as a part of a sentence. */
+  const weekday = (day: string): string => {
+    const near = { [today]: 'today', [addDays(today, 1)]: 'tomorrow', [addDays(today, -1)]: 'yesterday' } as const;
+    const relative = near[day];
+    if (relative) return t(`when.${relative}`);
+    const thisWeek = day > addDays(today, -7) && day < addDays(today, 7);
+    return thisWeek ? t('when.weekday', { name: format.weekdayName(isoWeekday(day)) }) : t('when.date', { name: format.day(day) });
+  };
+
+  /** "Friday evening": never finer, since a run-out is not known finer. */
+  const partOfDay = (at: number): string => {
+    const part = format.partOfDay(at);
+    const shift = part === 'night' ? nightHours * hour : 0;
+    const day = dayOf(at - shift, zone);
+    return t(`when.${part}`, { day: weekday(day), context: day === dayOf(now - shift, zone) ? 'today' : undefined });
+  };
+
+  return {
+    ...format,
+    weekday,
+    partOfDay,
+    /** The day of an instant. */
+    dayName: (at: number) => weekday(dayOf(at, zone)),
+    ago: (at: number) => format.ago(at, now),
+    dayAndWindow: (window: Window & { day: string }) => t('when.window', { day: weekday(window.day), window: format.times(window) }),
+    weekdays: (days: number[]) => format.list(days.filter(isWeekday).map((day) => format.weekdayName(day))),
+  };
+}
+
+const isWeekday = (day: number): day is Weekday => Number.isInteger(day) && day >= 1 && day <= 7;
+
+/** Sunday, which is 0 to JavaScript, is 7. */
+const isoWeekday = (day: string): Weekday => {
+  const number = new Date(`${day}T12:00:00Z`).getUTCDay();
+  return isWeekday(number) ? number : 7;
+};

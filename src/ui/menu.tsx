@@ -1,0 +1,64 @@
+import { useEffect, useRef, type FocusEvent, type KeyboardEvent, type MouseEvent, type ReactNode, type RefObject } from 'react';
+
+interface Props {
+  /** The button's name, where what it shows does not say it. */
+  label: string;
+  trigger: ReactNode;
+  align?: 'left' | 'right';
+  /** Opens above its button, at the foot of a page. */
+  upward?: boolean;
+  children: ReactNode;
+}
+
+/** A button that opens a short list of links and buttons: Enter or Space opens, Esc closes and gives focus back. */
+export function Menu({ label, trigger, align = 'right', upward = false, children }: Props) {
+  const box = useRef<HTMLDetailsElement>(null);
+  const close = () => {
+    if (box.current) box.current.open = false;
+  };
+  usePressOutside(box, close);
+  const onKeyDown = (event: KeyboardEvent) => {
+    if (event.key !== 'Escape' || !box.current?.open) return;
+    event.stopPropagation();
+    close();
+    box.current.querySelector('summary')?.focus();
+  };
+  const onBlur = ({ relatedTarget }: FocusEvent) => {
+    if (relatedTarget instanceof Node && !box.current?.contains(relatedTarget)) close();
+  };
+  const onChosen = ({ target }: MouseEvent) => {
+    if (target instanceof Element && target.closest('[data-menu-item]')) close();
+  };
+  return (
+    <details ref={box} className="group relative" onKeyDown={onKeyDown} onBlur={onBlur}>
+      <summary
+        aria-label={label}
+        className="flex min-h-11 list-none items-center gap-2 rounded-control px-2 text-ink-2 group-open:bg-sunk hover:bg-sunk [&::-webkit-details-marker]:hidden"
+      >
+        {trigger}
+      </summary>
+      <div
+        onClick={onChosen}
+        className={`absolute z-40 w-64 max-w-[calc(100vw-2rem)] rounded-card border border-edge bg-surface p-1.5 text-ink shadow-lg ${align === 'right' ? 'right-0' : 'left-0'} ${upward ? 'bottom-full mb-1' : 'top-full mt-1'}`}
+      >
+        {children}
+      </div>
+    </details>
+  );
+}
+
+/** For a link or button in the menu, beside `menuItem`: `<Link {...menuItem} to=…>`. */
+export const menuItem = {
+  'data-menu-item': '',
+  className: 'flex min-h-11 w-full items-center gap-2 rounded-control px-3 text-left hover:bg-sunk aria-[current=true]:bg-fjord-tint aria-[current=true]:text-fjord',
+};
+
+function usePressOutside(box: RefObject<HTMLElement | null>, act: () => void) {
+  useEffect(() => {
+    const press = ({ target }: PointerEvent) => {
+      if (target instanceof Node && !box.current?.contains(target)) act();
+    };
+    document.addEventListener('pointerdown', press);
+    return () => document.removeEventListener('pointerdown', press);
+  });
+}

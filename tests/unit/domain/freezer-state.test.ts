@@ -1,0 +1,94 @@
+import fc from 'fast-check';
+import { describe, expect, test } from 'vitest';
+import { foldState } from '../../../server/domain/freezer-state';
+import type { FreezerSetup, Reading } from '../../../server/domain/types';
+
+const HALF_HOUR = 1_800_000;
+const DAY = 86_400_000;
+const timeZone = 'America/Chicago';
+/** Midnight in Chicago. */
+const start = Date.UTC(2026, 5, 1, 5);
+const setup: FreezerSetup = {
+  model: { insideWidthIn: 58, insideDepthIn: 27, insideHeightIn: 48, ratedPounds: 830 },
+  mount: { channelDropIn: 1.5, rackIn: 2, headroomIn: 3, probesIn: [10, 29, 48] },
+  lanes: [
+    { productId: 'seven', widthShare: 0.5, bagPounds: 7 },
+    { productId: 'twenty', widthShare: 0.5, bagPounds: 20 },
+  ],
+};
+/** 10 lb an inch in each lane; the floor is 44.5 in below the probes. */
+const reading = (i: number, seven: number, twenty: number, airF: number | null = 18): Reading => ({
+  at: start + i * HALF_HOUR,
+  distancesIn: [44.5 - seven / 10, 44.5 - Math.max(seven, twenty) / 10, 44.5 - twenty / 10],
+  airF,
+  supplyV: 11.9,
+});
+/** Eight days of steady sales, 48 and 24 lb a day, and a truck after six that fills both lanes. */
+const days = Array.from({ length: 8 * 48 }, (_, i) => {
+  const truck = i >= 6 * 48 + 20;
+  const since = truck ? i - (6 * 48 + 20) : i;
+  return reading(i, (truck ? 400 : 390) - since, (truck ? 400 : 380) - since / 2);
+});
+const fold = (readings: Reading[]) => foldState({ setup, timeZone, readings });
+
+describe('the state of a freezer', () => {
+  test('one reading: its level, and nothing claimed that takes days', () => {
+    const state = fold([reading(0, 300, 200)]);
+    expect(state?.level.lanes.map(({ bags }) => bags)).toEqual([42, 10]);
+    expect(state?.level.pounds).toBeCloseTo(500, 6);
+    expect(state?.runOut).toEqual({ early: null, likely: null, late: null, lane: null });
+    expect(state?.warmSince).toBeNull();
+  });
+
+  test('a week: rates, the truck, and the first lane to run out', () => {
+    const state = fold(days);
+    expect(state?.deliveries).toHaveLength(1);
+    const [truck] = state?.deliveries ?? [];
+    expect(truck?.at).toBe(start + (6 * 48 + 20) * HALF_HOUR);
+    expect(state?.rates[0]?.poundsPerDay).toBeCloseTo(47.4, 0);
+    expect(state?.rates[1]?.poundsPerDay).toBeCloseTo(23.7, 0);
+    expect(state?.rates[0]?.days).toBe(7);
+    expect(state?.runOut.lane).toBe(0);
+    const left = state?.level.lanes[0]?.pounds ?? 0;
+    expect(((state?.runOut.likely ?? 0) - (state?.at ?? 0)) / DAY).toBeCloseTo(left / 47.4, 0);
+  });
+
+  test('the ribbon’s past keeps the truck’s step whole', () => {
+    const state = fold(days);
+    const at = state?.deliveries[0]?.at ?? 0;
+    const around = (state?.history ?? []).filter(([instant]) => Math.abs(instant - at) <= HALF_HOUR).map(([, share]) => share);
+    expect(Math.max(...around) - Math.min(...around)).toBeGreaterThan(0.4);
+  });
+
+  test('it depends on the set of readings alone', () => {
+    const some = days.slice(-100);
+    const expected = fold(some);
+    fc.assert(
+      fc.property(fc.shuffledSubarray([...some, ...some.slice(0, 40)], { minLength: 140, maxLength: 140 }), (shuffled) => {
+        expect(fold(shuffled)).toEqual(expected);
+      }),
+      { numRuns: 40 },
+    );
+  });
+
+  test('any readings at all: no crash, no NaN', () => {
+    const value = fc.oneof(fc.double(), fc.constant(null), fc.double({ min: 0, max: 60, noNaN: true }));
+    const any = fc.record({
+      at: fc.integer({ min: start, max: start + 9 * DAY }),
+      distancesIn: fc.array(value, { maxLength: 5 }),
+      airF: fc.oneof(fc.double({ min: -100, max: 200, noNaN: true }), fc.constant(null)),
+      supplyV: fc.constant(null),
+    });
+    fc.assert(
+      fc.property(fc.array(any, { maxLength: 60 }), (readings) => {
+        expect(JSON.stringify(fold(readings) ?? {})).not.toMatch(/NaN|Infinity/);
+        const state = fold(readings);
+        if (state) expect(Number.isFinite(state.level.pounds) && Number.isFinite(state.level.sdPounds)).toBe(true);
+      }),
+    );
+  });
+
+  test('a setup that cannot be gives no state', () => {
+    expect(foldState({ setup: { ...setup, lanes: [] }, timeZone, readings: days })).toBeNull();
+  });
+});
