@@ -22,9 +22,9 @@ export interface Running {
 const MINUTE = 60_000;
 
 /** Opens the data, migrates, builds, listens, and starts the jobs; `stop` undoes it in order. */
-export async function start(config: Config, root: string): Promise<Running> {
-  const services = openServices(config, root);
-  const { db, log, now, system, pipeline } = services;
+export async function start(config: Config, root: string, now = () => Date.now()): Promise<Running> {
+  const services = openServices(config, root, now);
+  const { db, log, system, pipeline } = services;
   const mail = config.smtpUrl ? smtpMail(config.smtpUrl, config.mailFrom) : localMail(db, config.mailFrom, now);
   const app = buildApp(services, path.join(root, 'dist/client'));
   const server = app.listen(config.port, config.host);
@@ -54,12 +54,11 @@ export async function start(config: Config, root: string): Promise<Running> {
 }
 
 /** Everything but the network, for commands that need the data alone too. */
-export function openServices(config: Config, root: string): Services {
+export function openServices(config: Config, root: string, now = () => Date.now()): Services {
   const log = pino({ level: config.logLevel, redact: ['req.headers.cookie', 'req.headers.authorization'] });
   const db = openDatabase(path.join(config.dataDir, 'nilas.db'));
   migrateDatabase(db, path.join(root, 'drizzle'));
   const system = systemDb(db);
-  const now = () => Date.now();
   const newId = () => uuidv7();
   const pipeline = openPipeline(db, { now, newId, nextSensorNo: system.nextSensorNo });
   const storage = localStorage(path.join(config.dataDir, 'photos'));

@@ -46,6 +46,7 @@ export interface FieldFault {
 export interface ProblemDocument {
   type: string;
   title: string;
+  detail: string;
   status: number;
   requestId?: string;
   params?: Record<string, string | number>;

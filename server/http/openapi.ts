@@ -90,10 +90,11 @@ function schemaOf(schema: z.ZodMiniType, io: 'input' | 'output'): object {
 
 const problemSchema = {
   type: 'object',
-  required: ['type', 'title', 'status'],
+  required: ['type', 'title', 'detail', 'status'],
   properties: {
     type: { enum: Object.keys(problems).map((type) => `urn:nilas:problem:${type}`) },
     title: { type: 'string' },
+    detail: { type: 'string' },
     status: { type: 'integer' },
     params: { type: 'object' },
     errors: {

@@ -1,6 +1,8 @@
-import type { ErrorRequestHandler, Response } from 'express';
+import type { ErrorRequestHandler, Request, Response } from 'express';
 import type { Logger } from 'pino';
 import type {} from 'pino-http';
+import en from '../../locales/en/problems.json';
+import es from '../../locales/es/problems.json';
 import { problems, problemTypePrefix, type FieldFault, type ProblemDocument, type ProblemType } from '../contract/problem';
 
 /** Thrown anywhere on the way to an answer; becomes `application/problem+json`. */
@@ -24,15 +26,21 @@ export const problemHandler =
     if (res.headersSent) return next(error);
     const known = recognise(error);
     if (!known) log.error({ err: error, requestId: req.id, method: req.method, path: req.path }, 'request failed');
-    sendProblem(res, known ?? problem('server-error'), known ? undefined : String(req.id));
+    sendProblem(req, res, known ?? problem('server-error'), known ? undefined : String(req.id));
   };
 
-export function sendProblem(res: Response, { type, params, errors }: ProblemError, requestId?: string): void {
+/** The type is for our own screens, which have its words; title and detail are for anybody else who asks. */
+function sendProblem(req: Request, res: Response, { type, params, errors }: ProblemError, requestId?: string): void {
   const status = problems[type];
-  const document: ProblemDocument = { type: problemTypePrefix + type, title: type, status, requestId, params, errors };
+  const words = req.acceptsLanguages('en', 'es') === 'es' ? es : en;
+  const { title, help } = words[type];
+  const document: ProblemDocument = { type: problemTypePrefix + type, title, detail: filled(help, params), status, requestId, params, errors };
   if (status === 429) res.setHeader('retry-after', String(params?.seconds ?? 60));
   res.status(status).type('application/problem+json').send(JSON.stringify(document));
 }
+
+const filled = (text: string, params: Record<string, string | number> = {}): string =>
+  text.replace(/\{\{(\w+)\}\}/g, (_, name: string) => String(params[name] ?? ''));
 
 /** Errors of the libraries we stand on, by their own codes. */
 function recognise(error: unknown): ProblemError | null {

@@ -22,7 +22,7 @@ export function LeaveGuard() {
   return (
     <Dialog open={blocker.state === 'blocked'} title={t('leave.title')} onClose={() => blocker.reset?.()}>
       <p>{t('leave.words')}</p>
-      <div className="mt-4 flex flex-wrap gap-3">
+      <div className="mt-4 grid gap-3 sm:flex">
         <Button onClick={() => blocker.reset?.()}>{t('leave.stay')}</Button>
         <Button variant="quiet" onClick={() => blocker.proceed?.()}>
           {t('leave.go')}

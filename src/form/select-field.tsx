@@ -1,5 +1,5 @@
+import { Field } from '../ui/field';
 import { Select } from '../ui/select';
-import { FieldFrame } from './field-frame';
 import { useField } from './use-field';
 
 interface Props {
@@ -14,11 +14,11 @@ interface Props {
 
 /** One of a few. */
 export function SelectField({ name, label, hint, options, empty, none }: Props) {
-  const { id, control, fault } = useField(name, none);
+  const { bound, fault } = useField(name, none);
   return (
-    <FieldFrame id={id} label={label} hint={hint} fault={fault}>
-      {(described) => (
-        <Select {...control} {...described}>
+    <Field label={label} hint={hint} error={fault}>
+      {(control) => (
+        <Select {...bound} {...control}>
           <option value="">{empty}</option>
           {options.map(({ value, label: words }) => (
             <option key={value} value={value}>
@@ -27,6 +27,6 @@ export function SelectField({ name, label, hint, options, empty, none }: Props) 
           ))}
         </Select>
       )}
-    </FieldFrame>
+    </Field>
   );
 }

@@ -11,7 +11,7 @@ interface Props {
 export function SubmitButton({ wide, children }: Props) {
   return (
     <div>
-      <Button type="submit" wide={wide} busy={useFormPending()}>
+      <Button type="submit" size="big" wide={wide} busy={useFormPending()}>
         {children}
       </Button>
     </div>

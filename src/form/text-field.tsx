@@ -1,11 +1,10 @@
-import type { InputHTMLAttributes } from 'react';
-import { FieldFrame } from './field-frame';
+import type { ComponentProps } from 'react';
+import { Field } from '../ui/field';
+import { TextArea } from '../ui/text-area';
+import { TextInput } from '../ui/text-input';
 import { useField } from './use-field';
 
-type Native = Pick<
-  InputHTMLAttributes<HTMLInputElement>,
-  'type' | 'autoComplete' | 'inputMode' | 'maxLength' | 'autoFocus' | 'lang' | 'min' | 'max'
->;
+type Native = Pick<ComponentProps<'input'>, 'type' | 'autoComplete' | 'inputMode' | 'maxLength' | 'autoFocus' | 'lang' | 'min' | 'max'>;
 
 interface Props extends Native {
   name: string;
@@ -18,19 +17,19 @@ interface Props extends Native {
 }
 
 /** A line or a box of text. */
-export function TextField({ name, label, hint, lines = 1, none, type = 'text', ...native }: Props) {
-  const { id, control, fault } = useField(name, none);
+export function TextField({ name, label, hint, lines = 1, none, type, autoComplete, inputMode, ...native }: Props) {
+  const { bound, fault } = useField(name, none);
   return (
-    <FieldFrame id={id} label={label} hint={hint} fault={fault}>
-      {(described) =>
+    <Field label={label} hint={hint} error={fault}>
+      {(control) =>
         lines > 1 ? (
-          <textarea {...control} {...described} {...native} rows={lines} className={box} />
+          <TextArea {...bound} {...control} {...pick(native)} rows={lines} />
         ) : (
-          <input {...control} {...described} {...native} type={type} className={box} />
+          <TextInput {...bound} {...control} {...native} type={type} autoComplete={autoComplete} inputMode={inputMode} />
         )
       }
-    </FieldFrame>
+    </Field>
   );
 }
 
-const box = 'min-h-12 w-full rounded-control border border-edge bg-surface px-3 py-2.5 text-ink aria-invalid:border-rust';
+const pick = ({ maxLength, autoFocus, lang }: Native) => ({ maxLength, autoFocus, lang });

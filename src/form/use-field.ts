@@ -1,13 +1,11 @@
-import { useId } from 'react';
 import { useFormContext, type RegisterOptions } from 'react-hook-form';
 import { useFaultWords } from './use-fault-words';
 
 /** A field of the form around, by its name in the body. `none` is what the body gets for an empty control. */
 export function useField(name: string, none?: { value: null | undefined }) {
-  const id = useId();
   const say = useFaultWords();
   const { register, getFieldState, formState } = useFormContext();
   const options: RegisterOptions = none ? { setValueAs: (value: unknown) => (value === '' ? none.value : value) } : {};
   const { error } = getFieldState(name, formState);
-  return { id, control: register(name, options), fault: error ? say(error.message) : undefined };
+  return { bound: register(name, options), fault: error ? say(error.message) : undefined };
 }

@@ -3,7 +3,7 @@ import { useQueryClient } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
 import { isRouteErrorResponse, Link, useRevalidator, useRouteError } from 'react-router-dom';
 import { Problem } from '../api/call';
-import { Button, ButtonLink } from '../ui/button';
+import { Button, buttonClass } from '../ui/button';
 import { paths } from '../paths';
 import { PageTitle } from './page-title';
 
@@ -26,7 +26,9 @@ function FailureOf({ problem }: { problem: Problem }) {
   return (
     <FailureFrame title={title} words={t(`${problem.type}.help`)}>
       {problem.type === 'not-signed-in' ? (
-        <ButtonLink to={paths.signIn(location.pathname + location.search)}>{t('common:failed.sign-in')}</ButtonLink>
+        <Link to={paths.signIn(location.pathname + location.search)} className={buttonClass()}>
+          {t('common:failed.sign-in')}
+        </Link>
       ) : (
         <WhatNow problem={problem} />
       )}

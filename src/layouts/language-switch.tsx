@@ -1,6 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import { languages, type Language } from '../../server/contract/words';
 import { setLanguage } from '../lib/i18n';
+import { SegmentedControl } from '../ui/segmented-control';
 
 interface Props {
   /** Keeps the choice with the person, where somebody is signed in. */
@@ -14,21 +15,7 @@ export function LanguageSwitch({ onChosen }: Props) {
     void setLanguage(language);
     onChosen?.(language);
   };
-  return (
-    <div role="group" aria-label={t('language.label')} className="flex overflow-hidden rounded-control border border-edge">
-      {languages.map((language) => (
-        <button
-          key={language}
-          type="button"
-          lang={language}
-          aria-pressed={i18n.language === language}
-          aria-label={t(`language.to-${language}`)}
-          onClick={() => choose(language)}
-          className="min-h-9 min-w-10 px-2 text-[13px] font-semibold text-ink-2 aria-pressed:bg-ink aria-pressed:text-paper"
-        >
-          {t(`language.${language}-short`)}
-        </button>
-      ))}
-    </div>
-  );
+  const segments = languages.map((value) => ({ value, short: t(`language.${value}-short`), label: t(`language.to-${value}`), lang: value }));
+  const now = languages.find((language) => language === i18n.language) ?? 'en';
+  return <SegmentedControl label={t('language.label')} segments={segments} value={now} onChange={choose} />;
 }

@@ -3,7 +3,7 @@ import { Outlet } from 'react-router-dom';
 import { useMe } from '../lib/me';
 import { FailureFrame } from './failure';
 import { KeptLanguageSwitch } from './kept-language-switch';
-import { Mark } from './mark';
+import { Brand } from '../ui/brand';
 import { PersonMenu } from './person-menu';
 
 /** The frame of somebody whom no producer has given a role. */
@@ -11,7 +11,7 @@ export function NobodyLayout() {
   return (
     <>
       <header className="flex items-center justify-between px-4 py-3 sm:px-6">
-        <Mark />
+        <Brand />
         <div className="flex items-center gap-2">
           <KeptLanguageSwitch />
           <PersonMenu />

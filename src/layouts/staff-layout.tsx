@@ -6,7 +6,7 @@ import type { Membership } from '../../server/contract/auth';
 import { paths } from '../paths';
 import { KeptLanguageSwitch } from './kept-language-switch';
 import { landingOf } from './landing';
-import { Mark } from './mark';
+import { Brand } from '../ui/brand';
 import { PersonMenu } from './person-menu';
 
 interface Props {
@@ -20,13 +20,18 @@ export function StaffLayout({ member, children }: Props) {
     <div className="min-h-dvh lg:grid lg:grid-cols-[196px_minmax(0,1fr)]">
       <header className="flex items-center justify-between gap-3 border-b border-rule bg-surface px-4 py-2.5 lg:sticky lg:top-0 lg:h-dvh lg:flex-col lg:items-stretch lg:justify-start lg:border-r lg:border-b-0 lg:px-3.5 lg:py-5">
         <Link to={landingOf(member)} className="rounded-control lg:px-2 lg:pb-3">
-          <Mark />
+          <Brand />
         </Link>
         <Sections slug={member.producer.slug} />
         <div className="flex items-center gap-2 lg:mt-auto lg:flex-col lg:items-start lg:gap-3 lg:px-2">
           <p className="hidden text-small text-ink-3 lg:block">{member.producer.name}</p>
           <KeptLanguageSwitch />
-          <PersonMenu upward />
+          <span className="lg:hidden">
+            <PersonMenu />
+          </span>
+          <span className="hidden lg:-ml-2 lg:block">
+            <PersonMenu upward />
+          </span>
         </div>
       </header>
       <main id="main" tabIndex={-1} className="min-w-0 pb-20 outline-none lg:pb-0">

@@ -8,7 +8,7 @@ import { q } from '../api/query';
 import { paths } from '../paths';
 import { KeptLanguageSwitch } from './kept-language-switch';
 import { landingOf } from './landing';
-import { Mark } from './mark';
+import { Brand } from '../ui/brand';
 import { PersonMenu } from './person-menu';
 
 interface Props {
@@ -22,7 +22,7 @@ export function StoreLayout({ member, children }: Props) {
     <div className="mx-auto max-w-[1160px]">
       <header className="flex items-center gap-3 px-4 py-3 sm:px-6">
         <Link to={landingOf(member)} className="rounded-control">
-          <Mark />
+          <Brand />
         </Link>
         <Supplier member={member} />
         <div className="ml-auto flex items-center gap-2 sm:gap-3">

@@ -14,5 +14,5 @@ export function useSignOut(): () => void {
     await navigate(paths.signIn());
     queryClient.clear();
   };
-  return () => mutate({}, { onSuccess: leave, onError: (problem) => void (isSignedOut(problem) && leave()) });
+  return () => mutate({}, { onSuccess: () => void leave(), onError: (problem) => void (isSignedOut(problem) && leave()) });
 }

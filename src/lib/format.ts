@@ -92,6 +92,7 @@ function numbersOf({ locale }: FormatOptions) {
     percent: (share: number) => percents.format(share),
     pounds: (value: number) => `${whole.format(value)}\u00a0lb`,
     degrees: (fahrenheit: number) => `${whole.format(fahrenheit)}\u00a0°F`,
+    tenths: (value: number) => tenths.format(value),
     inches: (value: number) => `${tenths.format(value)}″`,
     money: (cents: number) => dollars.format(cents / 100),
     list: (words: string[]) => lists.format(words),

@@ -30,14 +30,17 @@ export function Dialog({ open, title, onClose, closeLabel, wide = false, childre
     };
   }, [open]);
 
+  // On the press, not the click: a selection dragged out of a text box ends beside the dialog too.
   const beside = (event: MouseEvent) => {
-    if (event.target === box.current) onClose();
+    if (event.target !== box.current) return;
+    event.preventDefault();
+    onClose();
   };
   return (
     <dialog
       ref={box}
       aria-labelledby={heading}
-      onClick={beside}
+      onMouseDown={beside}
       onCancel={(event) => {
         event.preventDefault();
         onClose();

@@ -1,4 +1,4 @@
-import { useEffect, useId, useState, type ChangeEvent, type ReactNode } from 'react';
+import { useCallback, useId, type ChangeEvent, type ReactNode } from 'react';
 import { Camera, ImagePlus, X } from 'lucide-react';
 import { FieldError } from './field';
 
@@ -51,10 +51,17 @@ export function FileInput({ label, hint, error, files, onChange, max, accept, wo
 }
 
 function Photo({ file, words, onRemove }: { file: File; words: FileInputWords; onRemove: () => void }) {
-  const url = useObjectUrl(file);
+  const show = useCallback(
+    (image: HTMLImageElement) => {
+      const url = URL.createObjectURL(file);
+      image.src = url;
+      return () => URL.revokeObjectURL(url);
+    },
+    [file],
+  );
   return (
     <li className="relative">
-      {url && <img src={url} alt={words.preview(file.name)} className="size-24 rounded-control border border-edge object-cover" />}
+      <img ref={show} alt={words.preview(file.name)} className="size-24 rounded-control border border-edge object-cover" />
       <button type="button" aria-label={words.remove(file.name)} onClick={onRemove} className="absolute top-0 right-0 grid size-12 place-items-start justify-items-end p-1">
         <span className="grid size-7 place-items-center rounded-full border border-edge bg-surface text-ink">
           <X aria-hidden size={16} />
@@ -62,16 +69,6 @@ function Photo({ file, words, onRemove }: { file: File; words: FileInputWords; o
       </button>
     </li>
   );
-}
-
-function useObjectUrl(file: File): string | null {
-  const [url, setUrl] = useState<string | null>(null);
-  useEffect(() => {
-    const made = URL.createObjectURL(file);
-    setUrl(made);
-    return () => URL.revokeObjectURL(made);
-  }, [file]);
-  return url;
 }
 
 interface PickerProps {

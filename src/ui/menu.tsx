@@ -10,7 +10,7 @@ interface Props {
   children: ReactNode;
 }
 
-/** A button that opens a short list of links and buttons: Enter or Space opens, Esc closes and gives focus back. */
+/** A button that opens a short list of links and buttons: Enter or Space opens, arrows move, Esc closes and gives focus back. */
 export function Menu({ label, trigger, align = 'right', upward = false, children }: Props) {
   const box = useRef<HTMLDetailsElement>(null);
   const close = () => {
@@ -18,7 +18,12 @@ export function Menu({ label, trigger, align = 'right', upward = false, children
   };
   usePressOutside(box, close);
   const onKeyDown = (event: KeyboardEvent) => {
-    if (event.key !== 'Escape' || !box.current?.open) return;
+    if (!box.current?.open) return;
+    if (event.key === 'ArrowDown' || event.key === 'ArrowUp') {
+      event.preventDefault();
+      moveFocus(box.current, event.key === 'ArrowDown' ? 1 : -1);
+    }
+    if (event.key !== 'Escape') return;
     event.stopPropagation();
     close();
     box.current.querySelector('summary')?.focus();
@@ -52,6 +57,14 @@ export const menuItem = {
   'data-menu-item': '',
   className: 'flex min-h-11 w-full items-center gap-2 rounded-control px-3 text-left hover:bg-sunk aria-[current=true]:bg-fjord-tint aria-[current=true]:text-fjord',
 };
+
+/** To the next item or the one before, round the ends; from the button, to the first or last. */
+function moveFocus(menu: HTMLElement, step: 1 | -1) {
+  const items = [...menu.querySelectorAll<HTMLElement>('[data-menu-item]')];
+  const at = items.findIndex((item) => item === document.activeElement);
+  const next = at < 0 && step < 0 ? -1 : at + step;
+  items.at(next % items.length)?.focus();
+}
 
 function usePressOutside(box: RefObject<HTMLElement | null>, act: () => void) {
   useEffect(() => {

@@ -25,7 +25,7 @@ export const SegmentedControl = <V extends string>({ label, segments, value, onC
         aria-label={segment.label}
         aria-pressed={segment.value === value}
         onClick={() => onChange(segment.value)}
-        className="min-h-10 min-w-11 px-2.5 text-small font-semibold text-ink-2 -outline-offset-2 not-aria-pressed:hover:bg-sunk aria-pressed:bg-ink aria-pressed:text-paper aria-pressed:outline-paper"
+        className="min-h-11 min-w-11 px-2.5 text-small font-semibold text-ink-2 -outline-offset-2 not-aria-pressed:hover:bg-sunk aria-pressed:bg-ink aria-pressed:text-paper aria-pressed:outline-paper"
       >
         {segment.short}
       </button>

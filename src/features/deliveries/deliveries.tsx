@@ -1,11 +1,12 @@
 import { useTranslation } from 'react-i18next';
+import { Link } from 'react-router-dom';
 import { api } from '../../../server/contract/index';
 import type { Result } from '../../../server/contract/endpoint';
 import type { StorePage } from '../../../server/contract/stores';
 import { page, type Place } from '../../api/page';
 import { q } from '../../api/query';
 import { PageTitle } from '../../layouts/page-title';
-import { ButtonLink } from '../../ui/button';
+import { buttonClass } from '../../ui/button';
 import { StoreFrame } from '../stores/store-frame';
 import { storeQuery } from '../stores/store-query';
 import { useStoreWords } from '../stores/use-store-words';
@@ -66,14 +67,14 @@ function Paging({ next, later }: { next: string | null; later: boolean }) {
   return (
     <nav aria-label={t('pages')} className="mt-4 flex flex-wrap items-center gap-3">
       {later && (
-        <ButtonLink variant="quiet" to="?">
+        <Link className={buttonClass('quiet', { size: 'big' })} to="?">
           {t('first')}
-        </ButtonLink>
+        </Link>
       )}
       {next ? (
-        <ButtonLink variant="quiet" to={`?after=${encodeURIComponent(next)}`}>
+        <Link className={buttonClass('quiet', { size: 'big' })} to={`?after=${encodeURIComponent(next)}`}>
           {t('next')}
-        </ButtonLink>
+        </Link>
       ) : (
         <p className="text-ink-3">{t('end')}</p>
       )}

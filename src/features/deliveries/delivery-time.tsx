@@ -1,14 +1,14 @@
-import { useId, useState } from 'react';
+import { useState } from 'react';
 import { useFormContext } from 'react-hook-form';
 import { useTranslation } from 'react-i18next';
-import { FieldFrame } from '../../form/field-frame';
 import { useFaultWords } from '../../form/use-fault-words';
+import { Field } from '../../ui/field';
+import { TextInput } from '../../ui/text-input';
 import { instantOfInput, localInputOf } from './local-input';
 
 /** When it was delivered, by the store's clock. */
 export function DeliveryTime({ zone }: { zone: string }) {
   const { t } = useTranslation('deliveries');
-  const id = useId();
   const say = useFaultWords();
   const { setValue, getValues, getFieldState, formState } = useFormContext<{ at: number }>();
   const [typed, setTyped] = useState(() => localInputOf(getValues('at'), zone));
@@ -18,17 +18,12 @@ export function DeliveryTime({ zone }: { zone: string }) {
     setValue('at', instantOfInput(value, zone), { shouldDirty: true, shouldValidate: formState.isSubmitted });
   };
   return (
-    <FieldFrame id={id} label={t('record.time')} hint={t('zone', { zone })} fault={error ? say('time') : undefined}>
-      {(described) => (
-        <input
-          {...described}
-          type="datetime-local"
-          value={typed}
-          max={localInputOf(Date.now(), zone)}
-          onChange={({ target }) => change(target.value)}
-          className="min-h-12 w-full rounded-control border border-edge bg-surface px-3 py-2.5 text-ink aria-invalid:border-rust sm:w-72"
-        />
+    <Field label={t('record.time')} hint={t('zone', { zone })} error={error ? say('time') : undefined}>
+      {(control) => (
+        <span className="block sm:w-72">
+          <TextInput {...control} type="datetime-local" value={typed} max={localInputOf(Date.now(), zone)} onChange={({ target }) => change(target.value)} />
+        </span>
       )}
-    </FieldFrame>
+    </Field>
   );
 }

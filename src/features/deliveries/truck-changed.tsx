@@ -4,6 +4,7 @@ import { useParams } from 'react-router-dom';
 import type { NextTruck } from '../../../server/contract/deliveries';
 import type { Problem } from '../../api/call';
 import { queryClient } from '../../api/query';
+import { Notice } from '../../ui/notice';
 import { storeQueryOf } from '../stores/store-query';
 import { useStoreWords } from '../stores/use-store-words';
 
@@ -30,8 +31,8 @@ export function TruckChanged({ problem, theirs, onLearnt, zone }: Props) {
   }, [problem, producer, storeId, onLearnt]);
   if (!theirs) return null;
   return (
-    <p role="status" className="rounded-control border border-straw bg-straw-tint px-4 py-3 text-ink">
-      {theirs.truck ? t('next-truck.changed', { when: say.dayAndWindow(theirs.truck) }) : t('next-truck.changed-none')}
-    </p>
+    <Notice tone="caution" role="status" title={theirs.truck ? t('next-truck.changed', { when: say.dayAndWindow(theirs.truck) }) : t('next-truck.changed-none')}>
+      {t('next-truck.kept')}
+    </Notice>
   );
 }

@@ -38,7 +38,7 @@ function Profile({ sessions }: Parameters<typeof Sessions>[0]) {
       </section>
       <section className="max-w-sm">
         <h2 className="mb-2 font-bold">{t('theme')}</h2>
-        <ThemeChoice quietLabel />
+        <ThemeChoice />
       </section>
       <Memberships />
       <Sessions sessions={sessions} />

@@ -3,7 +3,7 @@ import type { Result } from '../../../server/contract/endpoint';
 import { api } from '../../../server/contract/index';
 import { useAct } from '../../api/act';
 import { ProblemNote } from '../../form/problem-note';
-import { useFormat } from '../../lib/use-format';
+import { useFormat } from '../../lib/format';
 import { Button } from '../../ui/button';
 import { Tag } from '../../ui/tag';
 

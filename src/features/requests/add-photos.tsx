@@ -1,69 +1,63 @@
-import { useId, useState } from 'react';
-import { ImagePlus } from 'lucide-react';
+import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { api } from '../../../server/contract/index';
 import { maxPhotoBytes, maxPhotos, type Request } from '../../../server/contract/requests';
 import { useAct } from '../../api/act';
 import { Problem } from '../../api/call';
 import { ProblemNote } from '../../form/problem-note';
+import { useTyped } from '../../form/typed';
 import { useMembership } from '../../lib/me';
+import { Button } from '../../ui/button';
+import { FileInput } from '../../ui/file-input';
 
-/** More photos, as long as the request has room for them. */
+/** More photos, as long as the request has room for them: looked at first, then sent. */
 export function AddPhotos({ request }: { request: Request }) {
   const { t } = useTranslation('requests');
   const { producer } = useMembership();
-  const send = useAct(api.requests.addPhotos, [api.requests.read, api.requests.list, api.stores.read]);
-  const [refusal, refuse] = useState<Problem | null>(null);
-  const id = useId();
+  const [files, setFiles] = useState<File[]>([]);
+  const act = useAct(api.requests.addPhotos, [api.requests.read, api.requests.list, api.stores.read]);
+  useTyped(files.length > 0);
   const room = maxPhotos - request.photoList.length;
-  if (room <= 0) return null;
-
-  const take = (files: File[]) => {
-    const wrong = fault(files, room);
-    refuse(wrong);
-    send.reset();
-    if (wrong || files.length === 0) return;
-    const form = new FormData();
-    for (const file of files) form.append('photos', file);
-    send.mutate({ params: { producer: producer.slug, requestId: request.id }, files: form });
-  };
-  const problem = refusal ?? send.error;
+  const large = files.some(({ size }) => size > maxPhotoBytes);
+  const problem = large ? new Problem('photo-too-large', 413) : act.error;
+  const send = () => act.mutate({ params: { producer: producer.slug, requestId: request.id }, files: asForm(files) }, { onSuccess: () => setFiles([]) });
 
   return (
     <div className="mt-3">
-      <label
-        htmlFor={id}
-        className="inline-flex min-h-12 cursor-pointer items-center gap-2 rounded-control border border-edge px-4 font-semibold text-fjord focus-within:outline-2 focus-within:outline-offset-2 focus-within:outline-fjord"
-      >
-        <ImagePlus aria-hidden size={18} />
-        {send.isPending ? t('photos.sending') : t('photos.add')}
-        <input
-          id={id}
-          type="file"
-          multiple
+      {room > 0 && (
+        <FileInput
+          label={t('photos.add')}
+          hint={t('photos.hint', { count: room })}
+          files={files}
+          onChange={setFiles}
+          max={room}
           accept="image/jpeg,image/png,image/webp"
-          disabled={send.isPending}
-          aria-describedby={`${id}-hint`}
-          className="sr-only"
-          onChange={(event) => {
-            take([...(event.target.files ?? [])]);
-            event.target.value = '';
+          words={{
+            add: t('photos.choose'),
+            camera: t('photos.take'),
+            remove: (name) => t('photos.remove', { name }),
+            preview: (name) => t('photos.preview', { name }),
+            count: t('photos.chosen', { count: files.length }),
           }}
         />
-      </label>
-      <p id={`${id}-hint`} className="mt-1 text-small text-ink-3">
-        {t('photos.hint', { count: room })}
-      </p>
-      <p role="status" className="text-small text-ink-2">
-        {send.isSuccess && t('photos.sent')}
-      </p>
+      )}
       {problem && <ProblemNote problem={problem} />}
+      {files.length > 0 && !large && (
+        <div className="mt-2">
+          <Button busy={act.isPending} onClick={send}>
+            {t('photos.send', { count: files.length })}
+          </Button>
+        </div>
+      )}
+      <p role="status" className="text-ink-2 empty:hidden">
+        {act.isSuccess && files.length === 0 && t('photos.sent')}
+      </p>
     </div>
   );
 }
 
-/** Found before anything is sent; the server looks again. */
-function fault(files: File[], room: number): Problem | null {
-  if (files.length > room) return new Problem('too-many-photos', 422);
-  return files.some(({ size }) => size > maxPhotoBytes) ? new Problem('photo-too-large', 413) : null;
+function asForm(files: File[]): FormData {
+  const form = new FormData();
+  for (const file of files) form.append('photos', file);
+  return form;
 }

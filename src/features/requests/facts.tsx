@@ -1,10 +1,10 @@
-import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Link } from 'react-router-dom';
 import type { Request } from '../../../server/contract/requests';
 import { useMembership } from '../../lib/me';
-import { useFormat } from '../../lib/use-format';
+import { useFormat } from '../../lib/format';
 import { paths } from '../../paths';
+import { DefinitionList } from '../../ui/definition-list';
 
 interface Props {
   request: Request;
@@ -17,23 +17,19 @@ export function Facts({ request, assignee }: Props) {
   const { t } = useTranslation('requests');
   const { producer } = useMembership();
   const format = useFormat();
+  const store = (
+    <Link to={paths.store(producer.slug, request.storeId)} className="text-fjord underline underline-offset-4">
+      {request.store}
+    </Link>
+  );
   return (
-    <dl className="grid gap-4">
-      <Fact name={t('one.store')}>
-        <Link to={paths.store(producer.slug, request.storeId)} className="font-semibold text-fjord underline underline-offset-4">
-          {request.store}
-        </Link>
-      </Fact>
-      <Fact name={t('one.freezer')}>{request.freezer ?? t('one.whole-store')}</Fact>
-      {assignee && <Fact name={t('one.assignee')}>{request.assignee?.name ?? t('list.unassigned')}</Fact>}
-      {request.scheduledDay && <Fact name={t('one.visit')}>{format.day(request.scheduledDay)}</Fact>}
-    </dl>
+    <DefinitionList
+      items={[
+        { term: t('one.store'), detail: store },
+        { term: t('one.freezer'), detail: request.freezer ?? t('one.whole-store') },
+        ...(assignee ? [{ term: t('one.assignee'), detail: request.assignee?.name ?? t('list.unassigned') }] : []),
+        ...(request.scheduledDay ? [{ term: t('one.visit'), detail: format.day(request.scheduledDay) }] : []),
+      ]}
+    />
   );
 }
-
-const Fact = ({ name, children }: { name: string; children: ReactNode }) => (
-  <div>
-    <dt className="text-small font-semibold text-ink-3">{name}</dt>
-    <dd>{children}</dd>
-  </div>
-);

@@ -26,7 +26,7 @@ export function Photos({ request, mayAdd }: Props) {
 }
 
 function Thumbs({ request }: { request: Request }) {
-  const { t } = useTranslation('requests');
+  const { t } = useTranslation(['requests', 'common']);
   const { producer } = useMembership();
   const [shown, show] = useState<number | null>(null);
   const { photoList, id: requestId } = request;
@@ -49,7 +49,7 @@ function Thumbs({ request }: { request: Request }) {
           </li>
         ))}
       </ul>
-      <Dialog open={large !== undefined} title={shown === null ? '' : name(shown)} onClose={() => show(null)} wide>
+      <Dialog open={large !== undefined} title={shown === null ? '' : name(shown)} onClose={() => show(null)} closeLabel={t('common:close')} wide>
         {large && shown !== null && (
           <img src={src(large.id)} alt={name(shown)} width={large.width} height={large.height} className="max-h-[75dvh] w-full object-contain" />
         )}

@@ -10,9 +10,16 @@ interface Props {
 
 /** The list by keyboard: `/` searches, arrows move, Enter opens (a link does by itself), Esc closes, `?` tells. */
 export function QueueKeys({ searchRef, close }: Props) {
-  const { t } = useTranslation('requests');
+  const { t } = useTranslation(['requests', 'common']);
   const [help, showHelp] = useState(false);
 
+  const keys: Record<string, (() => void) | undefined> = {
+    '/': () => searchRef.current?.focus(),
+    '?': () => showHelp(true),
+    ArrowDown: () => moveBy(1),
+    ArrowUp: () => moveBy(-1),
+    Escape: close,
+  };
   const press = useEffectEvent((event: KeyboardEvent) => {
     if (event.defaultPrevented || event.altKey || event.ctrlKey || event.metaKey || document.querySelector('dialog[open]')) return;
     const act = isTyping(event.target) ? undefined : keys[event.key];
@@ -23,13 +30,6 @@ export function QueueKeys({ searchRef, close }: Props) {
       searchRef.current?.blur();
     }
   });
-  const keys: Record<string, (() => void) | undefined> = {
-    '/': () => searchRef.current?.focus(),
-    '?': () => showHelp(true),
-    ArrowDown: () => moveBy(1),
-    ArrowUp: () => moveBy(-1),
-    Escape: close,
-  };
   useEffect(() => {
     const listener = (event: KeyboardEvent) => press(event);
     window.addEventListener('keydown', listener);
@@ -37,7 +37,7 @@ export function QueueKeys({ searchRef, close }: Props) {
   }, []);
 
   return (
-    <Dialog open={help} title={t('keys.title')} onClose={() => showHelp(false)}>
+    <Dialog open={help} title={t('keys.title')} onClose={() => showHelp(false)} closeLabel={t('common:close')}>
       <dl className="grid grid-cols-[auto_1fr] gap-x-6 gap-y-2">
         {(['search', 'move', 'open', 'close', 'help'] as const).map((key) => (
           <div key={key} className="contents">

@@ -1,7 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import { Link, useSearchParams } from 'react-router-dom';
 import type { RequestSummary } from '../../../server/contract/requests';
-import { useFormat } from '../../lib/use-format';
+import { useFormat } from '../../lib/format';
 import { useMembership } from '../../lib/me';
 import { paths } from '../../paths';
 import { StateTag } from './state-tag';

@@ -10,6 +10,7 @@ import { PageTitle } from '../../layouts/page-title';
 import { useMembership } from '../../lib/me';
 import { paths } from '../../paths';
 import { Pager } from '../../table/pager';
+import { EmptyState } from '../../ui/states';
 import { QueueFilters } from './queue-filters';
 import { QueueKeys } from './queue-keys';
 import { QueueRow } from './queue-row';
@@ -53,7 +54,7 @@ function ListPane({ list, open }: Props & { open: string | undefined }) {
       className={`${open ? 'hidden lg:block' : ''} lg:sticky lg:top-0 lg:h-dvh lg:overflow-y-auto lg:border-r lg:border-rule`}
     >
       {!open && <PageTitle title={title} />}
-      <h1 className="px-4 pt-5 pb-3 text-heading font-bold lg:pt-6">{title}</h1>
+      <h1 className="px-4 pt-5 pb-3 text-title font-bold lg:pt-6">{title}</h1>
       <QueueFilters searchRef={searchRef} />
       <Rows requests={list.requests} open={open} />
       <div className="px-4">
@@ -78,7 +79,11 @@ function Rows({ requests, open }: { requests: RequestSummary[]; open: string | u
     );
   }
   const empty = side === 'store' ? t('list.empty-store') : t('list.empty');
-  return <p className="px-4 py-8 text-ink-2">{search.size > 0 ? t('list.nothing') : empty}</p>;
+  return (
+    <div className="px-4">
+      <EmptyState title={search.size > 0 ? t('list.nothing') : empty} />
+    </div>
+  );
 }
 
 function Keys({ open, searchRef }: { open: string | undefined; searchRef: React.RefObject<HTMLInputElement | null> }) {

@@ -1,7 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import type { Request } from '../../../server/contract/requests';
 import { useMembership } from '../../lib/me';
-import { useFormat } from '../../lib/use-format';
+import { useFormat } from '../../lib/format';
 import { StateTag } from './state-tag';
 import { useZone } from './use-zone';
 
@@ -15,7 +15,7 @@ export function RequestHead({ request }: { request: Request }) {
   return (
     <header>
       <div className="flex flex-wrap items-start justify-between gap-x-4 gap-y-2">
-        <h1 className="text-heading font-bold" tabIndex={-1}>
+        <h1 className="text-title font-bold" tabIndex={-1}>
           {t(`kinds.${request.kind}`)}
         </h1>
         <StateTag state={request.state} day={request.scheduledDay} />

@@ -1,6 +1,6 @@
 import { useTranslation } from 'react-i18next';
 import type { RequestState } from '../../../server/contract/words';
-import { useFormat } from '../../lib/use-format';
+import { useFormat } from '../../lib/format';
 import { Tag, type TagTone } from '../../ui/tag';
 
 interface Props {

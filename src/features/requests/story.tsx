@@ -1,7 +1,8 @@
 import { useTranslation } from 'react-i18next';
 import type { Request } from '../../../server/contract/requests';
-import { useFormat, type Format } from '../../lib/use-format';
+import { useFormat, type Format } from '../../lib/format';
 import { Tag } from '../../ui/tag';
+import { Timeline, TimelineItem, type TimelineTone } from '../../ui/timeline';
 import { useZone } from './use-zone';
 
 type Entry = Request['entries'][number];
@@ -23,11 +24,13 @@ export function Story({ request, fresh }: Props) {
         {t('one.story')}
       </h2>
       {entries.length === 0 && <p className="mt-2 text-ink-3">{t('one.no-story')}</p>}
-      <ol className="mt-2">
-        {entries.map((entry) => (
-          <StoryEntry key={entry.id} entry={entry} format={format} fresh={fresh.has(entry.id)} />
-        ))}
-      </ol>
+      <div className="mt-3 ml-1">
+        <Timeline label={t('one.story')}>
+          {entries.map((entry) => (
+            <StoryEntry key={entry.id} entry={entry} format={format} fresh={fresh.has(entry.id)} />
+          ))}
+        </Timeline>
+      </div>
     </section>
   );
 }
@@ -35,23 +38,29 @@ export function Story({ request, fresh }: Props) {
 function StoryEntry({ entry, format, fresh }: { entry: Entry; format: Format; fresh: boolean }) {
   const { t } = useTranslation(['requests', 'common']);
   const { author, kind, words } = entry;
-  const note = kind === 'note';
   const by = author ? t('entries.by', { name: author.name, role: t(`common:roles.${author.role}`) }) : t('entries.nilas');
+  const when = (
+    <>
+      {fresh && <Tag tone="fjord">{t('change.fresh')}</Tag>} <time dateTime={new Date(entry.at).toISOString()}>{format.when(entry.at)}</time>
+    </>
+  );
   return (
-    <li className={note ? 'my-2 rounded-control bg-straw-tint px-4 py-3' : 'border-t border-rule py-3'}>
-      <p className="flex flex-wrap items-baseline justify-between gap-x-4 text-small text-ink-3">
-        <span>
-          {by}
-          {note && <strong className="text-straw"> · {t('entries.note')}</strong>}
-        </span>
-        <span className="flex items-baseline gap-2">
-          {fresh && <Tag tone="fjord">{t('change.fresh')}</Tag>}
-          <time dateTime={new Date(entry.at).toISOString()}>{format.when(entry.at)}</time>
-        </span>
+    <TimelineItem tone={tones[kind]} by={by} when={when}>
+      {kind === 'note' ? <Note words={words} /> : words ? <p className="whitespace-pre-line">{words}</p> : <Happened entry={entry} format={format} />}
+    </TimelineItem>
+  );
+}
+
+/** Never seen by the store, and never looking like what it sees. */
+function Note({ words }: { words: string }) {
+  const { t } = useTranslation('requests');
+  return (
+    <div className="rounded-control bg-straw-tint px-4 py-3">
+      <p className="text-small text-straw">
+        <strong>{t('entries.note')}</strong> · {t('entries.note-hint')}
       </p>
-      {words ? <p className="mt-0.5 whitespace-pre-line break-words">{words}</p> : <Happened entry={entry} format={format} />}
-      {note && <p className="mt-1 text-small text-straw">{t('entries.note-hint')}</p>}
-    </li>
+      <p className="mt-0.5 whitespace-pre-line">{words}</p>
+    </div>
   );
 }
 
@@ -68,3 +77,12 @@ function Happened({ entry, format }: { entry: Entry; format: Format }) {
   }
   return <p className="text-ink-2">{t(`entries.${kind}`)}</p>;
 }
+
+const tones: Record<Entry['kind'], TimelineTone> = {
+  opened: 'quiet',
+  reply: 'fjord',
+  note: 'straw',
+  state: 'kelp',
+  assigned: 'quiet',
+  photos: 'quiet',
+};

@@ -1,11 +1,11 @@
 import { useTranslation } from 'react-i18next';
-import { useLocation } from 'react-router-dom';
+import { Link, useLocation } from 'react-router-dom';
 import { api } from '../../../server/contract/index';
 import { useAct } from '../../api/act';
 import { ProblemNote } from '../../form/problem-note';
 import { PageTitle } from '../../layouts/page-title';
 import { paths } from '../../paths';
-import { Button, ButtonLink } from '../../ui/button';
+import { Button, buttonClass } from '../../ui/button';
 import { CodeForm } from './code-form';
 import { safeNext } from './safe-next';
 import { useEnter } from './use-enter';
@@ -45,7 +45,7 @@ function PressToEnter({ token, next }: { token: string; next: string | null }) {
   return (
     <>
       <p className="mt-2 mb-6 text-ink-2">{t('confirm.lead')}</p>
-      <Button wide busy={signIn.isPending} onClick={() => signIn.mutate({ body: { token } }, { onSuccess: enter })}>
+      <Button wide size="big" busy={signIn.isPending} onClick={() => signIn.mutate({ body: { token } }, { onSuccess: enter })}>
         {t('confirm.button')}
       </Button>
       {signIn.error && <ProblemNote problem={signIn.error} />}
@@ -68,9 +68,9 @@ function AnotherLink({ next }: { next: string | null }) {
   const { t } = useTranslation('sign-in');
   return (
     <p className="mt-4">
-      <ButtonLink variant="quiet" to={paths.signIn(next ?? undefined)}>
+      <Link to={paths.signIn(next ?? undefined)} className={buttonClass('quiet', { size: 'big' })}>
         {t('confirm.new')}
-      </ButtonLink>
+      </Link>
     </p>
   );
 }

@@ -31,7 +31,7 @@ function Ask({ next }: { next: string | null }) {
     input: (body) => ({ body: { ...body, next: next ?? undefined } }),
     stale: [],
     guarded: false,
-    onDone: (_, { email }) => navigate(location.pathname + location.search, { state: { email } }),
+    onDone: (_, { email }) => void navigate(location.pathname + location.search, { state: { email } }),
   });
   return (
     <>

@@ -16,11 +16,11 @@ interface Props {
 /** One answer: a big value, and a sentence that says what it means and what happens next. */
 export const AnswerBox = ({ question, value, aside, tone, children }: Props) => (
   <div className="min-w-0 px-5 py-4 lg:px-6 lg:py-5">
-    <h2 className="text-body font-semibold text-ink-3">{question}</h2>
+    <h2 className="text-base font-semibold text-ink-3">{question}</h2>
     <p className={`mt-1 flex flex-wrap items-baseline gap-x-2 ${toneText[tone]}`}>
-      <span className="text-display leading-tight font-bold whitespace-nowrap">{value}</span>
+      <span className="text-display leading-tight font-bold">{value}</span>
       {aside && <span className="text-lead font-semibold">{aside}</span>}
     </p>
-    <div className="mt-1 text-body text-ink-2 [&_b]:font-bold [&_b]:text-ink">{children}</div>
+    <div className="mt-1 text-base text-ink-2 [&_b]:font-bold [&_b]:text-ink">{children}</div>
   </div>
 );

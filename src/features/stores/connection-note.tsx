@@ -16,7 +16,7 @@ export function ConnectionNote({ place, now }: { place: Place; now: number }) {
   return (
     <div role="status" className="pointer-events-none fixed inset-x-0 bottom-36 z-20 flex justify-center px-4 lg:bottom-6">
       {cut && (
-        <p className="flex items-center gap-2 rounded-control border border-straw bg-straw-tint px-4 py-2.5 text-body font-semibold text-straw">
+        <p className="flex items-center gap-2 rounded-control border border-straw bg-straw-tint px-4 py-2.5 text-base font-semibold text-straw">
           <WifiOff aria-hidden size={18} className="shrink-0" />
           {t(online ? 'unreached' : 'offline', { ago: say.ago(dataUpdatedAt) })}
         </p>

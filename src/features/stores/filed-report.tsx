@@ -1,13 +1,14 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { CircleCheck } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
+import { Link } from 'react-router-dom';
 import { api } from '../../../server/contract/index';
 import type { StorePage } from '../../../server/contract/stores';
 import { q } from '../../api/query';
 import { ProblemNote } from '../../form/problem-note';
 import { useMembership } from '../../lib/me';
 import { paths } from '../../paths';
-import { Button, ButtonLink } from '../../ui/button';
+import { Button, buttonClass } from '../../ui/button';
 import { StepHeading } from './step-heading';
 import type { PhotoSending } from './use-photo-sending';
 
@@ -34,10 +35,10 @@ export function FiledReport({ requestId, store, kind = 'done', sending }: Props)
       <p className="mt-1 text-ink-2">{kind === 'done' ? t('done.words') : t('sooner.done-words')}</p>
       {sending && sending.count > 0 && <Photos requestId={requestId} sending={sending} />}
       <div className="mt-5 flex flex-wrap gap-3">
-        <ButtonLink to={paths.store(producer, store.id)}>{t('done.store')}</ButtonLink>
-        <ButtonLink variant="quiet" to={paths.request(producer, requestId)}>
+        <Link className={buttonClass('primary', { size: 'big' })} to={paths.store(producer, store.id)}>{t('done.store')}</Link>
+        <Link className={buttonClass('quiet', { size: 'big' })} to={paths.request(producer, requestId)}>
           {t('done.open', { number })}
-        </ButtonLink>
+        </Link>
       </div>
     </section>
   );

@@ -67,7 +67,7 @@ function Age({ at, zone, now }: { at: number; zone: string; now: number }) {
   const freshness = freshnessOf(at, now);
   if (freshness === 'fresh') return null;
   return (
-    <p className="mt-1 text-body font-semibold text-straw">
+    <p className="mt-1 text-base font-semibold text-straw">
       {freshness === 'unusable' ? t('freezer.unusable', { when: say.when(at) }) : t('freezer.old', { ago: say.ago(at) })}
     </p>
   );

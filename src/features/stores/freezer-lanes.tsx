@@ -10,23 +10,26 @@ interface Props {
 /** A lane under this share of full is low. */
 const lowShare = 0.25;
 
+/** Not by its colour alone. */
+const hatched = 'bg-[repeating-linear-gradient(135deg,var(--ember)_0_4px,var(--ember-tint)_4px_6px)]';
+
 /** How many bags of each size, against a full lane. */
 export function FreezerLanes({ freezer, state }: Props) {
   const { t } = useTranslation('store');
   const format = useFormat();
   return (
-    <ul aria-label={t('freezer.lanes')} className="grid gap-2">
+    <ul aria-label={t('freezer.lanes')} className="grid grid-cols-[auto_minmax(0,1fr)_auto] gap-x-3 gap-y-2">
       {state.level.lanes.map(({ bags, about, pounds, capacityPounds }, i) => {
         const lane = freezer.lanes[i];
         const share = capacityPounds > 0 ? Math.min(1, pounds / capacityPounds) : 0;
         const low = share < lowShare;
         return (
-          <li key={lane?.productId ?? i} className="grid grid-cols-[3.25rem_minmax(0,1fr)_auto] items-center gap-x-3">
+          <li key={lane?.productId ?? i} className="col-span-3 grid grid-cols-subgrid items-center">
             <span>{format.pounds(lane?.bagPounds ?? 0)}</span>
             <span aria-hidden className="h-2 overflow-hidden rounded-full bg-sunk">
-              <span className={`block h-full rounded-full ${low ? 'bg-ember' : 'bg-fjord-2'}`} style={{ width: `${share * 100}%` }} />
+              <span className={`block h-full rounded-full ${low ? hatched : 'bg-fjord-2'}`} style={{ width: `${share * 100}%` }} />
             </span>
-            <span className="min-w-20 text-right">
+            <span className="text-right">
               {low && <span className="mr-1.5 font-semibold text-ember">{t('freezer.low')}</span>}
               {t(about ? 'freezer.bags-about' : 'freezer.bags', { count: bags, bags: format.number(bags) })}
             </span>

@@ -1,6 +1,5 @@
 import { useTranslation } from 'react-i18next';
 import type { Freezer } from '../../../server/contract/freezers';
-import { usePlaceName } from './place-name';
 import { useStoreWords } from './use-store-words';
 
 interface Props {
@@ -14,14 +13,13 @@ interface Props {
 export function FreezerRunOuts({ freezer, state, zone, now }: Props) {
   const { t } = useTranslation('store');
   const say = useStoreWords(zone, now);
-  const place = usePlaceName();
   const dated = state.laneRunOuts.flatMap(({ likely, late }, i) => (likely === null || likely <= now ? [] : [{ likely, late, lane: freezer.lanes[i] }]));
   if (dated.length === 0) return null;
   return (
     <ul className="mt-3 grid gap-1 text-ink-2">
       {dated.map(({ likely, late, lane }) => {
-        const name = place(freezer.lanes.length > 1 ? (lane?.bagPounds ?? null) : null);
-        const words = { place: name, when: say.partOfDay(likely) };
+        const place = lane && freezer.lanes.length > 1 ? t('freezer.place.side', { size: say.pounds(lane.bagPounds) }) : t('freezer.place.freezer');
+        const words = { place, when: say.partOfDay(likely) };
         return (
           <li key={lane?.productId}>
             {late === null ? t('freezer.run-out', { ...words, context: 'likely' }) : t('freezer.run-out', { ...words, late: say.partOfDay(late) })}

@@ -19,7 +19,7 @@ export function FreezerSure({ freezer, state, zone, now }: Props) {
   const nameOf = (i: number) => format.pounds(freezer.lanes[i]?.bagPounds ?? 0);
   const within = (name: string, pounds: number, sd: number) => t('freezer.sure.pounds', { name, pounds: format.pounds(pounds), sd: format.number(Math.ceil(sd)) });
   return (
-    <details className="mt-2 text-body text-ink-2">
+    <details className="mt-2 text-base text-ink-2">
       <summary className="flex min-h-12 cursor-pointer items-center font-semibold text-fjord underline underline-offset-4 lg:min-h-8">{t('freezer.sure.open')}</summary>
       <ul className="grid gap-1 pb-1">
         {level.lanes.length > 1 && level.lanes.map(({ pounds, sdPounds }, i) => <li key={nameOf(i)}>{within(nameOf(i), pounds, sdPounds)}</li>)}

@@ -15,7 +15,7 @@ const tones: Record<FullSaid['key'], Tone> = {
   'perhaps-empty': 'low',
   'runs-out-first': 'low',
   'may-run-out-first': 'low',
-  'runs-out': 'fine',
+  'runs-out': 'low',
   'truck-first': 'fine',
   keeps: 'fine',
 };

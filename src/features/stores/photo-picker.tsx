@@ -14,8 +14,8 @@ export function PhotoPicker({ photos, refusals, choose }: ReturnType<typeof useP
       error={error || undefined}
       files={photos}
       onChange={choose}
-      // One more than fits, so that what is left out is said.
-      max={maxPhotos}
+      // While there is room, take all that is chosen: what does not fit is said.
+      max={photos.length < maxPhotos ? Infinity : maxPhotos}
       accept={photoTypes.join(',')}
       words={{
         add: t('photos.add'),

@@ -28,7 +28,9 @@ export function ReportDetails({ step, found, place, of, photos, onFiled }: Props
       <StepHeading>{t('details.question')}</StepHeading>
       <p className="text-ink-2">{t('details.optional')}</p>
       <Chosen step={step} found={found} search={place.search} />
-      <Caution kind={kind} />
+      <div className="mt-3">
+        <Caution kind={kind} />
+      </div>
       <RequestForm
         start={{ storeId: found.store.id, kind, freezerId }}
         label={t('details.words')}

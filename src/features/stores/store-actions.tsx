@@ -1,8 +1,9 @@
 import { useTranslation } from 'react-i18next';
+import { Link } from 'react-router-dom';
 import { row } from '../../../server/contract/ability';
 import { useAbility, useMembership } from '../../lib/me';
 import { paths } from '../../paths';
-import { ButtonLink } from '../../ui/button';
+import { buttonClass } from '../../ui/button';
 
 /** What can be asked for here, within thumb's reach on a phone; dispatch has its own two. */
 export function StoreActions({ storeId }: { storeId: string }) {
@@ -20,14 +21,14 @@ export function StoreActions({ storeId }: { storeId: string }) {
       {(mayPlan || mayRecord) && (
         <div role="group" aria-label={t('actions.staff')} className="flex flex-wrap gap-3">
           {mayPlan && (
-            <ButtonLink variant="quiet" to={paths.nextTruck(slug, storeId)}>
+            <Link className={buttonClass('quiet', { size: 'big' })} to={paths.nextTruck(slug, storeId)}>
               {t('actions.next-truck')}
-            </ButtonLink>
+            </Link>
           )}
           {mayRecord && (
-            <ButtonLink variant="quiet" to={paths.recordDelivery(slug, storeId)}>
+            <Link className={buttonClass('quiet', { size: 'big' })} to={paths.recordDelivery(slug, storeId)}>
               {t('actions.record')}
-            </ButtonLink>
+            </Link>
           )}
         </div>
       )}
@@ -35,13 +36,13 @@ export function StoreActions({ storeId }: { storeId: string }) {
         <div
           role="group"
           aria-label={t('actions.label')}
-          className={`fixed inset-x-0 z-20 grid auto-cols-fr grid-flow-col gap-2 border-t border-rule bg-surface px-4 py-2.5 lg:static lg:flex lg:border-0 lg:bg-transparent lg:p-0 ${side === 'producer' ? 'bottom-14' : 'bottom-0 pb-[max(0.625rem,env(safe-area-inset-bottom))]'}`}
+          className={`fixed inset-x-0 z-20 flex flex-wrap gap-2 border-t border-rule bg-surface px-4 py-2.5 *:grow *:basis-40 lg:static lg:border-0 lg:bg-transparent lg:p-0 lg:*:basis-auto ${side === 'producer' ? 'bottom-14' : 'bottom-0 pb-[max(0.625rem,env(safe-area-inset-bottom))]'}`}
         >
-          {mayReport && <ButtonLink to={paths.report(slug, storeId)}>{t('actions.report')}</ButtonLink>}
+          {mayReport && <Link className={buttonClass('primary', { size: 'big' })} to={paths.report(slug, storeId)}>{t('actions.report')}</Link>}
           {mayAsk && (
-            <ButtonLink variant="quiet" to={paths.askForIce(slug, storeId)}>
+            <Link className={buttonClass('quiet', { size: 'big' })} to={paths.askForIce(slug, storeId)}>
               {t('actions.sooner')}
-            </ButtonLink>
+            </Link>
           )}
         </div>
       )}

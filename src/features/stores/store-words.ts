@@ -7,6 +7,7 @@ import type { Format } from '../../lib/format';
 const hour = 3_600_000;
 /** Hours after midnight that people still call the night before (common practice, no published source). */
 const nightHours = 5;
+const nearDays = 6;
 
 /** How the store's sentences speak of days, beside what the application's formats give. */
 export function storeWords(t: TFunction<'store'>, format: Format, now: number) {
@@ -22,8 +23,9 @@ export function storeWords(t: TFunction<'store'>, format: Format, now: number) {
     return thisWeek ? t('when.weekday', { name: format.weekdayName(isoWeekday(day)) }) : t('when.date', { name: format.day(day) });
   };
 
-  /** "Friday evening": never finer, since a run-out is not known finer. */
+  /** "Friday evening", and further on only the day: a run-out is not known finer. */
   const partOfDay = (at: number): string => {
+    if (at - now > nearDays * 24 * hour) return weekday(dayOf(at, zone));
     const part = format.partOfDay(at);
     const shift = part === 'night' ? nightHours * hour : 0;
     const day = dayOf(at - shift, zone);

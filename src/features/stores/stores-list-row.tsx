@@ -3,16 +3,17 @@ import { Link } from 'react-router-dom';
 import type { StoreSummary } from '../../../server/contract/stores';
 import { freshnessOf } from '../../../server/domain/freshness';
 import { useMembership } from '../../lib/me';
-import { useFormat } from '../../lib/use-format';
+import { useFormat } from '../../lib/format';
 import { paths } from '../../paths';
 import { AttentionTag } from './attention-tag';
 
 interface Props {
   store: StoreSummary;
+  now: number;
 }
 
 /** One store: 52 px on a desk, a card on a phone. */
-export function StoresListRow({ store }: Props) {
+export function StoresListRow({ store, now }: Props) {
   const { t } = useTranslation('stores-list');
   const { producer, side } = useMembership();
   const format = useFormat(side === 'store' ? store.timeZone : producer.timeZone);
@@ -28,7 +29,7 @@ export function StoresListRow({ store }: Props) {
         </span>
       </th>
       <td role="cell" className={cell}>
-        <Level store={store} />
+        <Level store={store} now={now} />
       </td>
       <td role="cell" className={cell}>
         <Narrow label={t('columns.run-out')} />
@@ -36,7 +37,7 @@ export function StoresListRow({ store }: Props) {
       </td>
       <td role="cell" className={cell}>
         <Narrow label={t('columns.truck')} />
-        {nextTruck ? format.window(nextTruck) : t('no-truck')}
+        {nextTruck ? `${format.date(nextTruck.from)}, ${format.times(nextTruck)}` : t('no-truck')}
       </td>
       <td role="cell" className={cell}>
         <Narrow label={t('columns.requests')} />
@@ -58,17 +59,16 @@ const Narrow = ({ label }: { label: string }) => (
   </span>
 );
 
-function Level({ store }: Props) {
+function Level({ store, now }: Props) {
   const { t } = useTranslation('stores-list');
   const format = useFormat();
   const { share, pounds, at } = store;
   if (share === null || pounds === null || at === null) return <span className="text-ink-3">{t('no-level')}</span>;
-  const age = Date.now() - at;
   return (
     <>
       <span className="block">
         {t('level', { share: format.percent(share), pounds: format.pounds(pounds) })}
-        {freshnessOf(at, Date.now()) !== 'fresh' && <span className="text-small text-straw"> · {t('old-level', { age: format.age(age) })}</span>}
+        {freshnessOf(at, now) !== 'fresh' && <span className="text-small text-straw"> · {t('old-level', { age: format.duration(now - at) })}</span>}
       </span>
       <span aria-hidden className="mt-1 block h-1.5 max-w-36 overflow-hidden rounded-tag bg-sunk">
         <span className="block h-full bg-fjord-2" style={{ width: `${Math.round(share * 100)}%` }} />

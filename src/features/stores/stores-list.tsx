@@ -11,7 +11,9 @@ import { Pager } from '../../table/pager';
 import { SearchBox } from '../../table/search-box';
 import { useFilters } from '../../table/use-filters';
 import { Button } from '../../ui/button';
+import { EmptyState } from '../../ui/states';
 import { StoresListRow } from './stores-list-row';
+import { useNow } from './use-now';
 
 const EVERY = 60_000;
 
@@ -62,6 +64,7 @@ function StoreFilters() {
 /** Rows of a table on a desk, cards on a phone. */
 function Rows({ stores }: { stores: StoreSummary[] }) {
   const { t } = useTranslation('stores-list');
+  const now = useNow();
   return (
     <table role="table" className="block w-full text-left lg:table lg:rounded-card lg:bg-surface lg:outline lg:outline-rule">
       <thead role="rowgroup" className="sr-only lg:not-sr-only lg:table-header-group">
@@ -75,7 +78,7 @@ function Rows({ stores }: { stores: StoreSummary[] }) {
       </thead>
       <tbody role="rowgroup" className="grid gap-3 lg:table-row-group">
         {stores.map((store) => (
-          <StoresListRow key={store.id} store={store} />
+          <StoresListRow key={store.id} store={store} now={now} />
         ))}
       </tbody>
     </table>
@@ -86,22 +89,16 @@ function NoStores() {
   const { t } = useTranslation('stores-list');
   const { role } = useMembership();
   const filters = useFilters();
-  if (filters.any) {
-    return (
-      <div className="py-10">
-        <h2 className="font-bold">{role === 'driver' ? t('empty.driver') : t('nothing.title')}</h2>
-        <p className="mt-1 mb-4 text-ink-2">{t('nothing.words')}</p>
-        <Button variant="quiet" onClick={filters.clear}>
-          {t('nothing.clear')}
-        </Button>
-      </div>
-    );
-  }
+  if (!filters.any) return <EmptyState title={t('empty.title')}>{t('empty.words')}</EmptyState>;
+  const clear = (
+    <Button variant="quiet" onClick={filters.clear}>
+      {t('nothing.clear')}
+    </Button>
+  );
   return (
-    <div className="py-10">
-      <h2 className="font-bold">{t('empty.title')}</h2>
-      <p className="mt-1 text-ink-2">{t('empty.words')}</p>
-    </div>
+    <EmptyState title={role === 'driver' && filters.get('truck') === 'today' ? t('empty.driver') : t('nothing.title')} action={clear}>
+      {t('nothing.words')}
+    </EmptyState>
   );
 }
 

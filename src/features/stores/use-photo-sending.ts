@@ -2,7 +2,6 @@ import { api } from '../../../server/contract/index';
 import { useAct } from '../../api/act';
 import type { Problem } from '../../api/call';
 import { useTyped } from '../../form/typed';
-import type { Photo } from './photos';
 
 export interface PhotoSending {
   count: number;
@@ -12,12 +11,12 @@ export interface PhotoSending {
 }
 
 /** Sends the photos after the request they belong to; the request stays filed whatever becomes of them. */
-export function usePhotoSending(producer: string, photos: Photo[]): PhotoSending {
+export function usePhotoSending(producer: string, photos: File[]): PhotoSending {
   const act = useAct(api.requests.addPhotos, [api.requests.read, api.stores.read]);
   useTyped(act.isPending || act.isError);
   const send = (requestId: string) => {
     const files = new FormData();
-    for (const { file } of photos) files.append('photos', file);
+    for (const photo of photos) files.append('photos', photo);
     act.mutate({ params: { producer, requestId }, files });
   };
   return { count: photos.length, state: act.status, problem: act.error, send };

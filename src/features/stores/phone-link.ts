@@ -1,0 +1,2 @@
+/** What a phone dials. */
+export const phoneLink = (phone: string) => `tel:${phone.replace(/[^+\d]/g, '')}`;
