@@ -1,5 +1,6 @@
 import { dayOf } from './civil';
-import { standingOf, warmAboveF, type FreezerNow, type LaneRunOut, type Standing, type Window } from './freezer-standing';
+import { WARM_ABOVE_F } from './cooling';
+import { standingOf, type FreezerNow, type LaneRunOut, type Standing, type Window } from './freezer-standing';
 import { freshnessOf, type Freshness } from './freshness';
 
 /** What the store page knows, as far as the three answers need it. Instants in milliseconds since 1970 UTC. */
@@ -138,7 +139,11 @@ function sayStanding(standing: Standing, freezer: FreezerNow, truck: Window | nu
       return { key: 'keeps', past: standing.past };
     case 'empty':
       return { key: 'empty', place: placeOf(freezer, standing.lane), truck };
-    default:
+    case 'perhaps-empty':
+    case 'runs-out-first':
+    case 'may-run-out-first':
+    case 'runs-out':
+    case 'truck-first':
       return { key: standing.kind, place: placeOf(freezer, standing.runOut.lane), runOut: standing.runOut, truck };
   }
 }
@@ -161,7 +166,7 @@ function coldAnswer(freezers: FreezerNow[], now: number): ColdAnswer {
   const [first] = warm;
   if (first && first.warmSince !== null)
     return { value: { airF: first.airF, at: first.at, freshness: freshnessOf(first.at, now) }, said: { key: 'warm', freezer: first.name, since: first.warmSince, others: warm.length - 1 } };
-  if (warmest.airF > warmAboveF) return { value, said: { key: 'above-once', freezer: warmest.name, heard: warmest.at } };
+  if (warmest.airF > WARM_ABOVE_F) return { value, said: { key: 'above-once', freezer: warmest.name, heard: warmest.at } };
   const unknown = freezers.length - believed.length;
   const count = believed.length;
   return { value, said: unknown > 0 ? { key: 'holding-some', count, unknown, heard } : { key: 'holding', count, heard } };

@@ -4,10 +4,6 @@ import type { RunOut } from './types';
 
 /** Beyond this many days a run-out is said as "keeps past", without a part of the day. */
 const keepsAfterDays = 5;
-export const horizonDays = 14;
-/** Days of sales a lane must have shown before a run-out is said of it. */
-const leastDays = 2;
-export const warmAboveF = 32;
 
 /** What is known of one freezer; the current-state row and a little of its setup. */
 export interface FreezerNow {
@@ -65,7 +61,7 @@ export function standingOf(freezer: FreezerNow, truck: Window | null, now: numbe
   if (freshnessOf(state.at, now) === 'unusable') return { kind: 'silent', since: state.at };
   const empty = state.level.lanes.flatMap(({ bags }, lane) => (bags === 0 ? [lane] : []));
   if (empty[0] !== undefined) return { kind: 'empty', lane: empty.length === state.level.lanes.length ? null : empty[0] };
-  if (state.rates.every(({ days }) => days < leastDays)) return { kind: 'learning' };
+  if (state.rates.every(({ days }) => days === 0)) return { kind: 'learning' };
   return againstTruck(firstRunOut(state.laneRunOuts), truck, now, zone);
 }
 

@@ -23,7 +23,7 @@ export function FrontSection({ probes, lanes, airText, asOf, ...measures }: Prop
   const section = layOut(measures, lanes, texts);
   const { cabinet, inside } = section;
   const bottom = cabinet.y + cabinet.height;
-  const height = bottom + 46 + (lanes.some(({ low }) => low) ? 16 : 0);
+  const height = bottom + 46 + (lanes.some(({ low, bags }) => low && bags > 0) ? 16 : 0);
   return (
     <figure className="m-0">
       <svg viewBox={`0 0 ${drawingWidth} ${height}`} width={drawingWidth} height={height} aria-hidden className="mx-auto block h-auto max-w-full">
@@ -70,15 +70,14 @@ const Cabinet = ({ section: { cabinet, inside, floorY } }: { section: Section })
 );
 
 /** A low lane differs by its hatching as well as its colour; old readings leave only outlines. */
-function Lane({ box: { lane, stack, fullY }, faint }: { box: LaneBox; faint: boolean }) {
+function Lane({ box: { lane, stack }, faint }: { box: LaneBox; faint: boolean }) {
   const hatch = useId();
   const outlines = bagOutlines(lane.bags, stack);
   const edge = lane.low ? 'stroke-ember' : 'stroke-ice-2';
   const fill = lane.low ? 'fill-ember-tint' : 'fill-ice';
   return (
     <g>
-      <path d={`M${stack.x + 1} ${fullY}h6M${stack.x + stack.width - 7} ${fullY}h6`} className="stroke-edge" />
-      <path d={outlines} className={`${edge} ${faint ? 'fill-none' : fill}`} strokeWidth=".9" strokeDasharray={faint ? '2 1.6' : undefined} />
+      <path d={outlines} className={`${edge} ${faint ? 'fill-none' : fill}`} strokeWidth=".9" />
       {lane.low && !faint && (
         <>
           <pattern id={hatch} width="5" height="5" patternUnits="userSpaceOnUse" patternTransform="rotate(45)">
@@ -114,24 +113,22 @@ const Chip = ({ mark: { chip, text, endY } }: { mark: ProbeMark }) => (
 );
 
 /** Size, count and, where it is low, the word: one under the other, so that four lanes fit side by side. */
-function LaneWords({ box: { lane, centre }, y }: { box: LaneBox; y: number }) {
+function LaneWords({ box: { lane, stack, centre }, y }: { box: LaneBox; y: number }) {
   const { t } = useTranslation('freezer');
   const { number } = useFormat();
-  const ink = lane.low ? 'fill-ember' : 'fill-ink';
+  const tight = stack.width < 64;
   const count = t(lane.about ? 'section.count-about' : 'section.count', { bags: number(lane.bags) });
+  const lines = [lane.bags > 0 && count, lane.bags === 0 ? t('section.empty') : lane.low && t('section.low')].filter((line) => line !== false);
   return (
-    <g textAnchor="middle" className={`text-[12px] ${ink}`}>
+    <g textAnchor="middle" className={`${tight ? 'text-[11px]' : 'text-[12px]'} ${lane.low ? 'fill-ember' : 'fill-ink'}`}>
       <text x={centre} y={y} className="font-bold">
         {lane.label}
       </text>
-      <text x={centre} y={y + 16} className="font-medium">
-        {count}
-      </text>
-      {lane.low && (
-        <text x={centre} y={y + 32} className="font-bold">
-          {t(lane.bags === 0 ? 'section.empty' : 'section.low')}
+      {lines.map((line, i) => (
+        <text key={line} x={centre} y={y + 16 * (i + 1)} className={line === count ? 'font-medium' : 'font-bold'}>
+          {line}
         </text>
-      )}
+      ))}
     </g>
   );
 }

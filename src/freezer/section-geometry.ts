@@ -38,8 +38,6 @@ export interface LaneBox {
   lane: SectionLane;
   /** The stack of bags. */
   stack: Box;
-  /** The height of a full stack. */
-  fullY: number;
   centre: number;
 }
 
@@ -90,7 +88,7 @@ function laneBoxes(lanes: SectionLane[], inside: Box, floorY: number, scaleY: nu
     const x = inside.x + before * inside.width;
     const width = lane.widthShare * inside.width;
     const height = Math.min(lane.stackIn * scaleY, floorY - inside.y);
-    return { lane, stack: { x, y: floorY - height, width, height }, fullY: floorY - lane.usableStackIn * scaleY, centre: x + width / 2 };
+    return { lane, stack: { x, y: floorY - height, width, height }, centre: x + width / 2 };
   });
 }
 
@@ -110,12 +108,14 @@ function probeMarks(probes: { probe: SectionProbe; text: string }[], { inside, c
     return { probe, text, x, width, left: Math.min(right - width - 1, Math.max(inside.x + 1, x - width / 2)) };
   });
   const rows = rowsWithoutTouch(spots);
-  return spots.map(({ probe, text, x, width, left }, i) => ({
-    x,
-    text,
-    endY: probe.distanceIn === null ? null : Math.min(floorY, channelY + probe.distanceIn * scaleY),
-    chip: { x: left, y: channelY + 11 + (rows[i] ?? 0) * (chipHeight + gap), width, height: chipHeight },
-  }));
+  const oneRow = rows.every((row) => row === 0);
+  return spots.map(({ probe, text, x, width, left }, i) => {
+    const endY = probe.distanceIn === null ? null : Math.min(floorY, channelY + probe.distanceIn * scaleY);
+    const y = channelY + 9 + (rows[i] ?? 0) * (chipHeight + gap);
+    // Over a full stack the line is short: its label goes below where it ends.
+    const covers = oneRow && endY !== null && endY < y + chipHeight + 2;
+    return { x, text, endY, chip: { x: left, y: covers ? endY + 4 : y, width, height: chipHeight } };
+  });
 }
 
 /** Neighbours whose labels would touch are set in rows one under the other. */

@@ -9,27 +9,27 @@ export function FirstLook() {
 }
 
 const CardLook = () => (
-  <div aria-busy="true" className="mx-auto mt-24 grid max-w-md gap-4 px-4">
+  <main aria-busy="true" className="mx-auto mt-24 grid max-w-md gap-4 px-4">
     <Skeleton className="h-8 w-40" />
     <Skeleton className="h-48" />
-  </div>
+  </main>
 );
 
 const StoreLook = () => (
-  <div aria-busy="true" className="mx-auto grid max-w-[1160px] gap-6 px-4 py-5 sm:px-6">
+  <main aria-busy="true" className="mx-auto grid max-w-[1160px] gap-6 px-4 py-5 sm:px-6">
     <Skeleton className="h-7 w-28" />
     <Skeleton className="h-9 w-64" />
     <Skeleton className="h-72 sm:h-36" />
     <Skeleton className="h-96" />
-  </div>
+  </main>
 );
 
 const ListLook = () => (
-  <div aria-busy="true" className="grid gap-4 px-4 py-5 lg:ml-[196px] lg:px-6">
+  <main aria-busy="true" className="grid gap-4 px-4 py-5 lg:ml-[196px] lg:px-6">
     <Skeleton className="h-8 w-40" />
     <Skeleton className="h-11" />
     {Array.from({ length: 8 }, (_, row) => (
       <Skeleton key={row} className="h-13" />
     ))}
-  </div>
+  </main>
 );

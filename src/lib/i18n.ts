@@ -2,7 +2,7 @@ import i18next from 'i18next';
 import { initReactI18next } from 'react-i18next';
 import { languages, type Language } from '../../server/contract/words';
 
-const loaders = import.meta.glob<{ default: Record<string, unknown> }>('../../locales/*/*.json');
+const loaders = import.meta.glob<{ default: Record<string, unknown> }>(['../../locales/*/*.json', '!../../locales/*/mail.json']);
 const remembered = 'nilas.language';
 
 /** The language a person chose here, else the browser's, else English. */

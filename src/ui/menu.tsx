@@ -1,8 +1,8 @@
 import { useEffect, useRef, type FocusEvent, type KeyboardEvent, type MouseEvent, type ReactNode, type RefObject } from 'react';
 
 interface Props {
-  /** The button's name, where what it shows does not say it. */
-  label: string;
+  /** The button's name where what it shows is not enough; it then holds the shown words too. */
+  label?: string;
   trigger: ReactNode;
   align?: 'left' | 'right';
   /** Opens above its button, at the foot of a page. */

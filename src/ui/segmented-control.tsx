@@ -1,8 +1,10 @@
+import { VisuallyHidden } from './visually-hidden';
+
 export interface Segment<V extends string> {
   value: V;
-  /** What is seen, such as "EN". */
+  /** What is seen, such as "EN"; those who hear the page get both. */
   short: string;
-  /** What is heard, such as "English". */
+  /** What it stands for, such as "English". */
   label: string;
   lang?: string;
 }
@@ -16,18 +18,18 @@ interface Props<V extends string> {
 
 /** Two or three choices that act at once. */
 export const SegmentedControl = <V extends string>({ label, segments, value, onChange }: Props<V>) => (
-  <div role="group" aria-label={label} className="inline-flex overflow-hidden rounded-control border border-edge">
+  <div role="group" aria-label={label} className="flex w-fit overflow-hidden rounded-control border border-edge">
     {segments.map((segment) => (
       <button
         key={segment.value}
         type="button"
         lang={segment.lang}
-        aria-label={segment.label}
         aria-pressed={segment.value === value}
         onClick={() => onChange(segment.value)}
         className="min-h-11 min-w-11 px-2.5 text-small font-semibold text-ink-2 -outline-offset-2 not-aria-pressed:hover:bg-sunk aria-pressed:bg-ink aria-pressed:text-paper aria-pressed:outline-paper"
       >
         {segment.short}
+        {segment.label !== segment.short && <VisuallyHidden> {segment.label}</VisuallyHidden>}
       </button>
     ))}
   </div>

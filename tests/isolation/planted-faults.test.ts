@@ -1,18 +1,23 @@
 import { afterEach, beforeAll, describe, expect, test, vi } from 'vitest';
+import type * as AbilityModule from '../../server/contract/ability';
 import type { Viewer } from '../../server/contract/ability';
 import { eq, producers, signInLinks, sql, stores } from '../../server/db';
+import type * as AllowedModule from '../../server/db/allowed';
+import type * as StoreViewsModule from '../../server/db/views/stores';
 import type { Services } from '../../server/http/context';
+import type * as CrossSiteModule from '../../server/http/cross-site';
 import type { AlderMember } from '../cast';
 import { testApp, type TestApp, type World } from '../support/server';
 import { redemptionFindings } from '../api/redemption';
 import { cases, ingestWithKey, type Case } from './cases';
 import { crossSiteFindings } from './cross-site';
+import { forgotten } from './forgotten-producers';
 import { forgetProducer, rewriteStatements, withoutHook } from './sabotage';
 import { outsiders, surveyMember, surveyOutsider, surveyOwn, watchWrites } from './survey';
 
 /** Each fault is planted alone, and a small part of the matrix must find it. The matrix itself shows that without it nothing is found. */
 
-type RealAbility = typeof import('../../server/contract/ability');
+type RealAbility = typeof AbilityModule;
 type Widen = (ability: ReturnType<RealAbility['abilityFor']>, viewer: Viewer) => void;
 
 const planted = vi.hoisted(() => ({
@@ -23,7 +28,7 @@ const planted = vi.hoisted(() => ({
 }));
 
 vi.mock('../../server/db/allowed', async (original) => {
-  const real = await original<typeof import('../../server/db/allowed')>();
+  const real = await original<typeof AllowedModule>();
   return { ...real, allowed: (...given: Parameters<typeof real.allowed>) => (planted.everythingAllowed ? sql`1` : real.allowed(...given)) };
 });
 vi.mock('../../server/contract/ability', async (original) => {
@@ -36,12 +41,12 @@ vi.mock('../../server/contract/ability', async (original) => {
   return { ...real, abilityFor };
 });
 vi.mock('../../server/http/cross-site', async (original) => {
-  const real = await original<typeof import('../../server/http/cross-site')>();
+  const real = await original<typeof CrossSiteModule>();
   const refuseCrossSite: typeof real.refuseCrossSite = (baseUrl) => (planted.crossSite ? (_req, _res, next) => next() : real.refuseCrossSite(baseUrl));
   return { refuseCrossSite };
 });
 vi.mock('../../server/db/views/stores', async (original) => {
-  const real = await original<typeof import('../../server/db/views/stores')>();
+  const real = await original<typeof StoreViewsModule>();
   const { problem } = await import('../../server/http/problem');
   const storeView: typeof real.storeView = (db, ability, id) => {
     const found = real.storeView(db, ability, id);
@@ -104,40 +109,6 @@ beforeAll(async () => {
   await alone.close();
   server = undefined;
 });
-
-const forgotten: [what: string, calls: RegExp, statement: RegExp, column: string][] = [
-  ['the list of stores', /^stores\.list/, /as "openRequests"/, '"store"."producer_id"'],
-  ['its join of districts', /^stores\.list/, /as "openRequests"/, '"district"."producer_id"'],
-  ['its join of accounts', /^stores\.list/, /as "openRequests"/, '"account"."producer_id"'],
-  ['its join of trucks', /^stores\.list/, /as "openRequests"/, '"next_truck"."producer_id"'],
-  ['its count of requests', /^stores\.list/, /as "openRequests"/, 'r.producer_id'],
-  ['its freezers', /^stores\.list/, /as "openRequests"/, 'f.producer_id'],
-  ['its states', /^stores\.list/, /as "openRequests"/, 'st.producer_id'],
-  ['a store', /^stores\.read/, /^select .*"postal_code".* from "store"/, '"store"."producer_id"'],
-  ['a store’s account', /^stores\.read/, /^select .*"postal_code".* from "store"/, '"account"."producer_id"'],
-  ['the freezers', /^freezers\./, /insideWidthIn/, '"freezer"."producer_id"'],
-  ['a freezer’s model', /^freezers\./, /insideWidthIn/, '"model"."producer_id"'],
-  ['a freezer’s lanes', /^freezers\./, /insideWidthIn/, 'l.producer_id'],
-  ['a lane’s product', /^freezers\./, /insideWidthIn/, 'p.producer_id'],
-  ['a freezer’s state', /^freezers\./, /insideWidthIn/, 'st.producer_id'],
-  ['the requests', /^requests\.(list|read)/, /as "openedAt"/, '"request"."producer_id"'],
-  ['a request’s store', /^requests\.(list|read)/, /as "openedAt"/, '"store"."producer_id"'],
-  ['a request’s people', /^requests\.(list|read)/, /as "openedAt"/, 'm.producer_id'],
-  ['a request’s count of photos', /^requests\.(list|read)/, /as "openedAt"/, 'ph.producer_id'],
-  ['a request’s timeline', /^requests\.read$/, /from "request_entry"/, 'e.producer_id'],
-  ['a request’s photos', /^requests\.read$/, /^select .* from "photo"/, '"photo"."producer_id"'],
-  ['the deliveries', /^deliveries\.list/, /as "toldFrom"/, 'd.producer_id'],
-  ['the lines of a delivery', /^deliveries\.list/, /as "toldFrom"/, 'l.producer_id'],
-  ['the load of a truck', /^stores\.read/, /as load/, 'l.producer_id'],
-  ['the products', /^products/, /^select .* from "product"/, '"product"."producer_id"'],
-  ['the people requests are given to', /^requests\.assignees/, /m\.role in/, 'm.producer_id'],
-  ['the staff who are written to', /^requests\.file/, /m\.role in/, 'm.producer_id'],
-  ['the managers who are written to', /^requests\.change/, /m\.role = 'store-manager'/, 'm.producer_id'],
-  ['the numbers of requests', /^requests\.file/, /from "counter"/, '"counter"."producer_id"'],
-  ['the change of a request', /^requests\.change/, /^update "request"/, '"request"."producer_id"'],
-  ['the removal of a truck', /^deliveries\.clearNextTruck/, /^delete from "next_truck"/, '"next_truck"."producer_id"'],
-  ['the removal of a load', /^deliveries\.setNextTruck/, /^delete from "next_truck_load"/, '"next_truck_load"."producer_id"'],
-];
 
 test.each(forgotten)('a forgotten producer in %s is found', async (_what, calls, statement, column) => {
   const broken = await open();

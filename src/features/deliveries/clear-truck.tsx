@@ -23,7 +23,7 @@ export function ClearTruck({ storeId }: { storeId: string }) {
     clear.mutate({ params: { producer: slug, storeId } }, { onSuccess: () => void navigate(paths.store(slug, storeId)) });
   return (
     <div className="mt-8 border-t border-rule pt-4">
-      <Button variant="quiet" onClick={() => setAsking(true)}>
+      <Button variant="quiet" size="big" onClick={() => setAsking(true)}>
         {t('next-truck.clear')}
       </Button>
       <Dialog open={asking} title={t('next-truck.clear-ask')} onClose={() => setAsking(false)}>

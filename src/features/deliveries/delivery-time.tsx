@@ -4,6 +4,7 @@ import { useTranslation } from 'react-i18next';
 import { useFaultWords } from '../../form/use-fault-words';
 import { Field } from '../../ui/field';
 import { TextInput } from '../../ui/text-input';
+import { useNow } from '../stores/use-now';
 import { instantOfInput, localInputOf } from './local-input';
 
 /** When it was delivered, by the store's clock. */
@@ -12,6 +13,7 @@ export function DeliveryTime({ zone }: { zone: string }) {
   const say = useFaultWords();
   const { setValue, getValues, getFieldState, formState } = useFormContext<{ at: number }>();
   const [typed, setTyped] = useState(() => localInputOf(getValues('at'), zone));
+  const now = useNow();
   const { error } = getFieldState('at', formState);
   const change = (value: string) => {
     setTyped(value);
@@ -21,7 +23,7 @@ export function DeliveryTime({ zone }: { zone: string }) {
     <Field label={t('record.time')} hint={t('zone', { zone })} error={error ? say('time') : undefined}>
       {(control) => (
         <span className="block sm:w-72">
-          <TextInput {...control} type="datetime-local" value={typed} max={localInputOf(Date.now(), zone)} onChange={({ target }) => change(target.value)} />
+          <TextInput {...control} type="datetime-local" value={typed} max={localInputOf(now, zone)} onChange={({ target }) => change(target.value)} />
         </span>
       )}
     </Field>

@@ -8,7 +8,7 @@ import { SelectField } from '../../form/select-field';
 import { TextField } from '../../form/text-field';
 import { useFaultWords } from '../../form/use-fault-words';
 import { useFormat } from '../../lib/format';
-import { Button } from '../../ui/button';
+import { Button, IconButton } from '../../ui/button';
 import { BagsField } from './bags-field';
 import type { Products } from './record-delivery';
 
@@ -37,7 +37,7 @@ export function LineFields({ products, freezers }: Props) {
         ))}
       </div>
       <div className="mt-3 flex flex-wrap items-center justify-between gap-3">
-        <Button variant="quiet" onClick={() => append({ productId: '', freezerId: null, bags: 0, takenBack: 0, lot: '' })}>
+        <Button variant="quiet" size="big" onClick={() => append({ productId: '', freezerId: null, bags: 0, takenBack: 0, lot: '' })}>
           <Plus aria-hidden size={18} />
           {t('record.add')}
         </Button>
@@ -51,7 +51,13 @@ function Line({ i, products, freezers, onRemove }: Props & { i: number; onRemove
   const { t } = useTranslation('deliveries');
   const name = (field: string) => `lines.${i}.${field}`;
   return (
-    <div role="group" aria-label={t('record.line', { n: i + 1 })} className="relative rounded-card border border-rule bg-surface p-4 pr-14">
+    <div role="group" aria-label={t('record.line', { n: i + 1 })} className="rounded-card border border-rule bg-surface px-4 pt-1 pb-4">
+      <div className="-mr-3 flex items-center justify-between">
+        <span aria-hidden className="text-small text-ink-3">
+          {t('record.line', { n: i + 1 })}
+        </span>
+        <IconButton label={t('record.remove', { n: i + 1 })} icon={<X aria-hidden size={20} />} onClick={onRemove} />
+      </div>
       <div className="grid gap-3 sm:grid-cols-2">
         <SelectField name={name('productId')} label={t('record.product')} options={products.map(({ id, name: label }) => ({ value: id, label }))} empty={t('record.choose')} none={{ value: undefined }} />
         <SelectField name={name('freezerId')} label={t('record.freezer')} options={freezers.map(({ id, name: label }) => ({ value: id, label }))} empty={t('record.no-freezer')} none={{ value: null }} />
@@ -59,11 +65,10 @@ function Line({ i, products, freezers, onRemove }: Props & { i: number; onRemove
       <div className="mt-3 grid grid-cols-2 gap-3 sm:grid-cols-3">
         <BagsField name={name('bags')} label={t('record.bags')} />
         <BagsField name={name('takenBack')} label={t('record.taken-back')} />
-        <TextField name={name('lot')} label={t('record.lot')} maxLength={40} />
+        <div className="col-span-2 sm:col-span-1">
+          <TextField name={name('lot')} label={t('record.lot')} maxLength={40} />
+        </div>
       </div>
-      <button type="button" aria-label={t('record.remove', { n: i + 1 })} onClick={onRemove} className="absolute top-1 right-1 grid size-12 place-items-center rounded-control text-ink-2 hover:text-ink">
-        <X aria-hidden size={20} />
-      </button>
     </div>
   );
 }

@@ -15,6 +15,7 @@ import { PageTitle } from '../../layouts/page-title';
 import { paths } from '../../paths';
 import { StoreFrame } from '../stores/store-frame';
 import { storeQuery } from '../stores/store-query';
+import { useMust } from '../stores/use-must';
 import { BagsField } from './bags-field';
 import { ClearTruck } from './clear-truck';
 import { productsQuery } from './products-query';
@@ -36,6 +37,7 @@ interface Props {
 /** Dispatch says when the next truck comes, and with what. */
 function SetNextTruck({ found, listed }: Props) {
   const { t } = useTranslation('deliveries');
+  useMust('update', 'NextTruck', { storeId: found.store.id });
   return (
     <StoreFrame store={found.store} narrow>
       <PageTitle title={t('next-truck.title')} />
@@ -66,15 +68,17 @@ function TruckForm({ found, products }: { found: StorePage; products: Products }
   return (
     <Form form={form} className="mt-4">
       {form.problem?.type === 'truck-changed' && <TruckChanged problem={form.problem} theirs={theirs} onLearnt={setTheirs} zone={found.store.timeZone} />}
-      <div className="grid gap-4 sm:grid-cols-3">
-        <TextField name="day" label={t('next-truck.day')} type="date" />
+      <div className="grid grid-cols-2 gap-4 sm:grid-cols-3">
+        <div className="col-span-2 sm:col-span-1">
+          <TextField name="day" label={t('next-truck.day')} type="date" />
+        </div>
         <TextField name="from" label={t('next-truck.from')} type="time" />
         <TextField name="to" label={t('next-truck.to')} type="time" />
       </div>
       <fieldset>
         <legend className="font-semibold">{t('next-truck.load')}</legend>
         {products.length === 0 && <p className="text-ink-2">{t('next-truck.no-products')}</p>}
-        <div className="mt-2 grid gap-4 sm:grid-cols-3">
+        <div className="mt-2 grid grid-cols-2 gap-4 sm:grid-cols-3">
           {products.map(({ id, name }, i) => (
             <BagsField key={id} name={`load.${i}.bags`} label={name} />
           ))}
@@ -88,8 +92,9 @@ function TruckForm({ found, products }: { found: StorePage; products: Products }
 /** What is set now, or tomorrow morning. */
 function startOf({ store, nextTruck }: StorePage, products: Products) {
   const zone = store.timeZone;
+  const today = dayOf(Date.now(), zone);
   return {
-    day: nextTruck?.day ?? addDays(dayOf(Date.now(), zone), 1),
+    day: nextTruck && nextTruck.day >= today ? nextTruck.day : addDays(today, 1),
     from: nextTruck ? timeOfDayIn(nextTruck.from, zone) : '08:00',
     to: nextTruck ? timeOfDayIn(nextTruck.to, zone) : '10:00',
     load: products.map(({ id }) => ({ productId: id, bags: nextTruck?.load.find(({ productId }) => productId === id)?.bags ?? 0 })),

@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useNavigate } from 'react-router-dom';
 import type { Result } from '../../../server/contract/endpoint';
@@ -12,6 +13,7 @@ import { useMembership } from '../../lib/me';
 import { paths } from '../../paths';
 import { StoreFrame } from '../stores/store-frame';
 import { storeQuery } from '../stores/store-query';
+import { useMust } from '../stores/use-must';
 import { DeliveryTime } from './delivery-time';
 import { LineFields } from './line-fields';
 import { productsQuery } from './products-query';
@@ -34,8 +36,10 @@ function RecordDelivery({ found, listed }: Props) {
   const navigate = useNavigate();
   const { slug } = useMembership().producer;
   const storeId = found.store.id;
+  useMust('create', 'Delivery', { storeId });
+  const [opened] = useState(Date.now);
   const form = useContractForm(api.deliveries.record, {
-    start: { at: Date.now(), lines: linesOf(found, listed.products) },
+    start: { at: opened, lines: linesOf(found, listed.products) },
     input: (body) => ({
       params: { producer: slug, storeId },
       body: { ...body, lines: body.lines.filter(({ bags, takenBack }) => bags > 0 || takenBack > 0) },

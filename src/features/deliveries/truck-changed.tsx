@@ -6,6 +6,7 @@ import type { Problem } from '../../api/call';
 import { queryClient } from '../../api/query';
 import { Notice } from '../../ui/notice';
 import { storeQueryOf } from '../stores/store-query';
+import { useNow } from '../stores/use-now';
 import { useStoreWords } from '../stores/use-store-words';
 
 /** What somebody else set meanwhile; null once it is known that they took the truck away. */
@@ -24,7 +25,7 @@ interface Props {
 export function TruckChanged({ problem, theirs, onLearnt, zone }: Props) {
   const { t } = useTranslation('deliveries');
   const { producer = '', storeId = '' } = useParams();
-  const say = useStoreWords(zone, Date.now());
+  const say = useStoreWords(zone, useNow());
   useEffect(() => {
     void queryClient.fetchQuery({ ...storeQueryOf(producer, storeId), staleTime: 0 }).then(({ nextTruck }) => onLearnt({ truck: nextTruck }));
     // Anew for each refusal: a second one tells of a second change.

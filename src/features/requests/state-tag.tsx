@@ -17,11 +17,11 @@ export function StateTag({ state, day }: Props) {
 }
 
 const tones: Record<RequestState, TagTone> = {
-  new: 'ember',
+  new: 'fjord',
   open: 'fjord',
   'waiting-on-store': 'straw',
-  scheduled: 'fjord',
-  solved: 'kelp',
+  scheduled: 'kelp',
+  solved: 'quiet',
   closed: 'quiet',
   cancelled: 'quiet',
 };

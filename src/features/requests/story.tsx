@@ -82,7 +82,7 @@ const tones: Record<Entry['kind'], TimelineTone> = {
   opened: 'quiet',
   reply: 'fjord',
   note: 'straw',
-  state: 'kelp',
+  state: 'quiet',
   assigned: 'quiet',
   photos: 'quiet',
 };

@@ -9,6 +9,7 @@ import { RequestForm } from './request-form';
 import { StoreFrame } from './store-frame';
 import { knownOf } from './store-known';
 import { storeQuery } from './store-query';
+import { useMust } from './use-must';
 import { useNow } from './use-now';
 import { useStoreWords } from './use-store-words';
 
@@ -23,6 +24,7 @@ interface Props {
 function AskForIce({ found, place }: Props) {
   const { t } = useTranslation('report');
   const navigate = useNavigate();
+  useMust('create', 'Request', { storeId: found.store.id, kind: 'ice-sooner' });
   const filed = place.search.get('filed');
   return (
     <StoreFrame store={found.store} narrow>

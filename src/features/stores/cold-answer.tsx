@@ -53,7 +53,9 @@ function Sentence({ said, zone, now }: { said: ColdSaid; zone: string; now: numb
       return t(key, { count: said.count, context: said.count === 2 ? 'both' : undefined });
     case 'holding-some':
       return t(key, { count: said.count, all: said.count + said.unknown });
-    default:
+    case 'no-freezers':
+    case 'no-sensor':
+    case 'waiting':
       return t(key);
   }
 }

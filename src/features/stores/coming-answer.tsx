@@ -53,7 +53,8 @@ function Sentence({ said, window, zone, now }: { said: ComingSaid; window: Told[
       return `${t('answers.coming.due', { time: say.time(said.dueBy), late: say.duration(said.lateMs) })} ${said.bags > 0 ? bags('bags', said.bags) : ''}`;
     case 'in-window':
       return `${t('answers.coming.in-window', { time: say.time(window?.to ?? now) })} ${said.bags > 0 ? bags('bags', said.bags) : ''}`;
-    default:
+    case 'ahead':
+    case 'today':
       return said.bags > 0 ? bags('bags', said.bags) : t('answers.coming.no-load');
   }
 }

@@ -1,14 +1,12 @@
 import { useTranslation } from 'react-i18next';
 import type { Freezer } from '../../../server/contract/freezers';
 import { useFormat } from '../../lib/format';
+import { isLow } from './lane-low';
 
 interface Props {
   freezer: Freezer;
   state: NonNullable<Freezer['state']>;
 }
-
-/** A lane under this share of full is low. */
-const lowShare = 0.25;
 
 /** Not by its colour alone. */
 const hatched = 'bg-[repeating-linear-gradient(135deg,var(--ember)_0_4px,var(--ember-tint)_4px_6px)]';
@@ -22,7 +20,7 @@ export function FreezerLanes({ freezer, state }: Props) {
       {state.level.lanes.map(({ bags, about, pounds, capacityPounds }, i) => {
         const lane = freezer.lanes[i];
         const share = capacityPounds > 0 ? Math.min(1, pounds / capacityPounds) : 0;
-        const low = share < lowShare;
+        const low = isLow({ pounds, capacityPounds });
         return (
           <li key={lane?.productId ?? i} className="col-span-3 grid grid-cols-subgrid items-center">
             <span>{format.pounds(lane?.bagPounds ?? 0)}</span>

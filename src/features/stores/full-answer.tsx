@@ -57,7 +57,12 @@ function Sentence({ said, zone, now }: { said: FullSaid; zone: string; now: numb
     case 'waiting':
     case 'learning':
       return t(key);
-    default:
+    case 'empty':
+    case 'perhaps-empty':
+    case 'runs-out-first':
+    case 'may-run-out-first':
+    case 'runs-out':
+    case 'truck-first':
       return (
         <>
           <Trans t={t} i18nKey={key} components={{ b: <b /> }} values={{ place: place(said.place.bagPounds), ...timesOf(said, say) }} /> <TruckAfter said={said} zone={zone} now={now} />

@@ -56,12 +56,10 @@ function Chosen({ step, found, search }: Pick<Props, 'step' | 'found'> & { searc
   return (
     <dl className="mt-3 divide-y divide-rule rounded-card border border-rule bg-surface">
       {rows.map(({ label, value, again }) => (
-        <div key={label} className="flex items-center justify-between gap-3 px-4">
-          <div className="min-w-0 py-2">
-            <dt className="text-small text-ink-3">{label}</dt>
-            <dd className="font-semibold">{value}</dd>
-          </div>
-          <dd>
+        <div key={label} className="grid grid-cols-[minmax(0,1fr)_auto] gap-x-3 px-4 py-1.5">
+          <dt className="text-small text-ink-3">{label}</dt>
+          <dd className="font-semibold">{value}</dd>
+          <dd className="col-start-2 row-span-2 row-start-1 self-center">
             <Link to={again} aria-label={t('change-what', { what: label })} className="inline-flex min-h-12 items-center font-semibold text-fjord underline underline-offset-4">
               {t('change')}
             </Link>

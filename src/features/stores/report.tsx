@@ -2,6 +2,7 @@ import { useTranslation } from 'react-i18next';
 import { useNavigate } from 'react-router-dom';
 import type { StorePage } from '../../../server/contract/stores';
 import { page, type Place } from '../../api/page';
+import { useTyped } from '../../form/typed';
 import { PageTitle } from '../../layouts/page-title';
 import { FiledReport } from './filed-report';
 import { usePhotos } from './photos';
@@ -11,6 +12,7 @@ import { ReportKind } from './report-kind';
 import { reportStep, withAnswers, type ReportStep } from './report-steps';
 import { StoreFrame } from './store-frame';
 import { storeQuery } from './store-query';
+import { useMust } from './use-must';
 import { usePhotoSending } from './use-photo-sending';
 
 export const reportPage = page({ queries: (place) => ({ found: storeQuery(place) }), View: Report });
@@ -23,6 +25,7 @@ interface Props {
 /** Three taps: what, where, send. The answers stand in the address; the photos stay here while the steps change. */
 function Report({ found, place }: Props) {
   const { t } = useTranslation('report');
+  useMust('create', 'Request', { storeId: found.store.id, kind: 'other' });
   const step = reportStep(place.search, found.freezers.map(({ id }) => id));
   return (
     <StoreFrame store={found.store} narrow>
@@ -37,6 +40,7 @@ function Steps({ step, found, place }: Props & { step: ReportStep }) {
   const navigate = useNavigate();
   const photos = usePhotos();
   const sending = usePhotoSending(place.params.producer ?? '', photos.photos);
+  useTyped(photos.photos.length > 0 && step.step !== 'filed');
   const of = found.freezers.length > 1 ? 3 : 2;
   const filed = (requestId: string) => {
     if (photos.photos.length > 0) sending.send(requestId);

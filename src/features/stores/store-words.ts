@@ -1,6 +1,6 @@
 import type { TFunction } from 'i18next';
 import type { Weekday } from '../../../server/contract/words';
-import { addDays, dayOf } from '../../../server/domain/civil';
+import { addDays, dayOf, instantOf } from '../../../server/domain/civil';
 import type { Window } from '../../../server/domain/freezer-standing';
 import type { Format } from '../../lib/format';
 
@@ -20,7 +20,7 @@ export function storeWords(t: TFunction<'store'>, format: Format, now: number) {
     const relative = near[day];
     if (relative) return t(`when.${relative}`);
     const thisWeek = day > addDays(today, -7) && day < addDays(today, 7);
-    return thisWeek ? t('when.weekday', { name: format.weekdayName(isoWeekday(day)) }) : t('when.date', { name: format.day(day) });
+    return thisWeek ? t('when.weekday', { name: format.weekday(instantOf(day, '12:00', zone)) }) : t('when.date', { name: format.day(day) });
   };
 
   /** "Friday evening", and further on only the day: a run-out is not known finer. */
@@ -38,6 +38,8 @@ export function storeWords(t: TFunction<'store'>, format: Format, now: number) {
     partOfDay,
     /** The day of an instant. */
     dayName: (at: number) => weekday(dayOf(at, zone)),
+    /** For a mark on a drawing: "Thu". */
+    shortDay: (at: number) => format.weekday(at, 'short'),
     ago: (at: number) => format.ago(at, now),
     dayAndWindow: (window: Window & { day: string }) => t('when.window', { day: weekday(window.day), window: format.times(window) }),
     weekdays: (days: number[]) => format.list(days.filter(isWeekday).map((day) => format.weekdayName(day))),
@@ -45,9 +47,3 @@ export function storeWords(t: TFunction<'store'>, format: Format, now: number) {
 }
 
 const isWeekday = (day: number): day is Weekday => Number.isInteger(day) && day >= 1 && day <= 7;
-
-/** Sunday, which is 0 to JavaScript, is 7. */
-const isoWeekday = (day: string): Weekday => {
-  const number = new Date(`${day}T12:00:00Z`).getUTCDay();
-  return isWeekday(number) ? number : 7;
-};

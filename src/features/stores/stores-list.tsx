@@ -66,22 +66,24 @@ function Rows({ stores }: { stores: StoreSummary[] }) {
   const { t } = useTranslation('stores-list');
   const now = useNow();
   return (
-    <table role="table" className="block w-full text-left lg:table lg:rounded-card lg:bg-surface lg:outline lg:outline-rule">
-      <thead role="rowgroup" className="sr-only lg:not-sr-only lg:table-header-group">
-        <tr role="row" className="text-small text-ink-3">
-          {(['store', 'level', 'run-out', 'truck', 'requests', 'attention'] as const).map((column) => (
-            <th key={column} scope="col" role="columnheader" className="px-3 py-2.5 font-semibold">
-              {t(`columns.${column}`)}
-            </th>
+    <div className="lg:overflow-x-auto lg:rounded-card lg:border lg:border-rule lg:bg-surface">
+      <table role="table" className="block w-full text-left lg:table">
+        <thead role="rowgroup" className="sr-only lg:not-sr-only lg:table-header-group">
+          <tr role="row" className="text-small text-ink-3">
+            {(['store', 'level', 'run-out', 'truck', 'requests', 'attention'] as const).map((column) => (
+              <th key={column} scope="col" role="columnheader" className="px-3 py-2.5 font-semibold">
+                {t(`columns.${column}`)}
+              </th>
+            ))}
+          </tr>
+        </thead>
+        <tbody role="rowgroup" className="grid gap-3 lg:table-row-group">
+          {stores.map((store) => (
+            <StoresListRow key={store.id} store={store} now={now} />
           ))}
-        </tr>
-      </thead>
-      <tbody role="rowgroup" className="grid gap-3 lg:table-row-group">
-        {stores.map((store) => (
-          <StoresListRow key={store.id} store={store} now={now} />
-        ))}
-      </tbody>
-    </table>
+        </tbody>
+      </table>
+    </div>
   );
 }
 

@@ -92,7 +92,7 @@ describe('Full?', () => {
   });
 
   it('says that too few days were seen', () => {
-    const young = freezer({ state: state({ rates: [{ days: 1 }, { days: 0 }] }) });
+    const young = freezer({ state: state({ rates: [{ days: 0 }, { days: 0 }] }) });
     expect(full({ freezers: [young] }).said).toEqual({ key: 'learning' });
   });
 

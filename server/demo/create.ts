@@ -1,0 +1,161 @@
+import { accounts, districts, freezers, installs, lanes, memberships, membershipScopes, models as modelTable, people, producerDb, producers, products, sensors, stores, type ProducerDb } from '../db';
+import type { Weekday } from '../contract/words';
+import type { Services } from '../http/context';
+import { bagSizes, models, type DemoModel, type DemoPerson, type DemoProducer } from './data/producers';
+import { seeded, type Random } from './random';
+
+const DAY = 86_400_000;
+export const historyDays = 120;
+/** A freezer whose sensor came yesterday, and stores whose second freezer has none. */
+const newlyFitted = ['Heron Dock', 'Punta Serena'];
+const unfitted = ['Lantern Corner 14', 'Cattail Cove', 'Muelle Viejo'];
+
+/** Writes one producer with everybody and everything but its history. Answers its id. */
+export function createDemoProducer(services: Services, demo: DemoProducer): string {
+  const { db, newId, now } = services;
+  const id = newId();
+  const { slug, name, language, urgentPhone } = demo;
+  const createdAt = now() - (historyDays + 30) * DAY;
+  db.insert(producers).values({ id, slug, name, language, urgentPhone, timeZone: 'America/Chicago', createdAt }).run();
+  const plot: Plot = { demo, db: producerDb(db, id), newId, createdAt, now: now(), random: seeded(slug), ids: new Map(), nextSensorNo: services.system.nextSensorNo };
+  createPlaces(plot);
+  createFreezers(plot);
+  for (const person of demo.people) createPerson(services, plot, person);
+  return id;
+}
+
+interface Plot {
+  demo: DemoProducer;
+  db: ProducerDb;
+  newId: () => string;
+  createdAt: number;
+  now: number;
+  random: Random;
+  /** By name, as the data names things. */
+  ids: Map<string, string>;
+  nextSensorNo: () => number;
+}
+
+function idOf({ ids }: Plot, name: string): string {
+  const id = ids.get(name);
+  if (!id) throw new Error(`the demo names ${name}, which is not there`);
+  return id;
+}
+
+function named({ ids, newId }: Plot, name: string): string {
+  const id = newId();
+  ids.set(name, id);
+  return id;
+}
+
+const usualDays: Weekday[][] = [[2, 5], [1, 4], [3, 6], [1, 3, 5], [2, 4, 6]];
+const kinds = ['convenience', 'fuel', 'grocery', 'bait'];
+
+function createPlaces(plot: Plot): void {
+  const { db, demo, createdAt, random } = plot;
+  for (const name of demo.districts) db.insert(districts, { id: named(plot, name), name, createdAt });
+  demo.accounts.forEach((account, group) => {
+    const accountId = named(plot, account.name);
+    db.insert(accounts, { id: accountId, number: account.number, name: account.name, terms: 'net 30', language: account.language, createdAt });
+    account.stores.forEach((name, i) => {
+      const [south, north] = demo.area;
+      db.insert(stores, {
+        id: named(plot, name),
+        accountId,
+        districtId: idOf(plot, demo.districts[(i + group) % demo.districts.length] ?? ''),
+        name,
+        kind: kinds[group] ?? 'convenience',
+        street: `${random.whole(100, 2900)} ${random.pick(demo.streets)}`,
+        city: random.pick(demo.towns),
+        region: demo.region,
+        postalCode: `${demo.region === 'TX' ? '783' : '726'}${String(random.whole(10, 89))}`,
+        latitude: random.between(south?.[0] ?? 0, north?.[0] ?? 0),
+        longitude: random.between(south?.[1] ?? 0, north?.[1] ?? 0),
+        timeZone: 'America/Chicago',
+        language: /Campo Verde|Esquina/.test(name) ? 'es' : /Sandbar|Cactus/.test(name) ? 'en' : account.language,
+        phone: `555-01${String(random.whole(10, 99))}`,
+        openHours: [6, 22],
+        receivingHours: [{ days: [1, 2, 3, 4, 5, 6], from: '06:30', to: '15:00' }],
+        deliveryDays: random.pick(usualDays),
+        driverNotes: random.chance(0.3) ? 'Gate on the left; ring for the back door.' : '',
+        createdAt,
+      });
+    });
+  });
+}
+
+const placesAt = {
+  en: ['Front freezer, by the register', 'Side wall, outdoors', 'By the pumps', 'Aisle end'],
+  es: ['Congelador del frente, junto a la caja', 'Pared lateral, exterior', 'Junto a las bombas', 'Final del pasillo'],
+};
+
+function createFreezers(plot: Plot): void {
+  const { db, demo, createdAt, random } = plot;
+  for (const pounds of bagSizes) db.insert(products, { id: named(plot, `${pounds} lb`), name: `${pounds} lb`, bagPounds: pounds, createdAt });
+  for (const model of models) {
+    const { name, width, depth, height, doors, rated, defrost } = model;
+    db.insert(modelTable, { id: named(plot, name), name, insideWidthIn: width, insideDepthIn: depth, insideHeightIn: height, doors, ratedPounds: rated, defrost, createdAt });
+  }
+  let number = 0;
+  demo.accounts.flatMap((account) => account.stores).forEach((store, i) => {
+    const count = i % 5 < 2 || unfitted.includes(store) ? 2 : 1;
+    for (let position = 0; position < count; position += 1) {
+      number += 1;
+      const fitted = !(position === 1 && unfitted.includes(store));
+      createFreezer(plot, { store, position, number, model: random.pick(models), fittedAt: fitted ? (newlyFitted.includes(store) ? plot.now - 1.1 * DAY : createdAt) : null });
+    }
+  });
+}
+
+interface Fitted {
+  store: string;
+  position: number;
+  number: number;
+  model: DemoModel;
+  fittedAt: number | null;
+}
+
+function createFreezer(plot: Plot, { store, position, number, model, fittedAt }: Fitted): void {
+  const { db, demo, random, createdAt, newId, nextSensorNo } = plot;
+  const outdoor = position === 1 || random.chance(0.4);
+  const words = placesAt[demo.language];
+  const freezerId = newId();
+  db.insert(freezers, {
+    id: freezerId,
+    storeId: idOf(plot, store),
+    modelId: idOf(plot, model.name),
+    assetNumber: String(40_100 + number),
+    name: words[position === 0 ? (outdoor ? 2 : random.pick([0, 3])) : 1] ?? '',
+    placement: outdoor ? 'outdoor' : 'indoor',
+    condition: random.pick(['good', 'good', 'worn']),
+    channelDropIn: 1.5,
+    rackIn: 2,
+    headroomIn: 3,
+    position,
+    createdAt,
+  });
+  const shares = model.doors === 1 ? [1] : model.doors === 3 ? random.pick([[0.34, 0.33, 0.33], [0.5, 0.5]]) : random.pick([[0.5, 0.5], [0.6, 0.4], [1]]);
+  const sizes = shares.length === 3 ? bagSizes : shares.length === 1 ? [random.pick([10, 7])] : random.pick([[7, 20], [10, 20], [7, 10]]);
+  shares.forEach((widthShare, lane) =>
+    db.insert(lanes, { id: newId(), freezerId, position: lane, productId: idOf(plot, `${sizes[lane] ?? 10} lb`), widthShare }),
+  );
+  if (fittedAt === null) return;
+  const sensorId = newId();
+  const serial = `${demo.serialPrefix}${String(number).padStart(4, '0')}`;
+  db.insert(sensors, { id: sensorId, no: nextSensorNo(), serial, firstHeardAt: fittedAt, createdAt: fittedAt });
+  const probesIn = [0.18, 0.5, 0.82].map((share) => Math.round(share * model.width * 2) / 2);
+  db.insert(installs, { id: newId(), sensorId, freezerId, probesIn, from: fittedAt });
+}
+
+function createPerson({ db: raw, system, newId }: Services, plot: Plot, person: DemoPerson): void {
+  const { db, createdAt } = plot;
+  const { name, email, language, role, side } = person;
+  const personId = system.personByEmail(email)?.id ?? newId();
+  raw.insert(people).values({ id: personId, email, name, language, createdAt }).onConflictDoNothing().run();
+  const membershipId = newId();
+  db.insert(memberships, { id: membershipId, personId, role, side: side ?? (role === 'store-manager' ? 'store' : 'producer'), createdAt: createdAt + plot.ids.size });
+  const scope = { membershipId, storeId: null, districtId: null, accountId: null };
+  for (const store of person.stores ?? []) db.insert(membershipScopes, { id: newId(), ...scope, storeId: idOf(plot, store) });
+  if (person.district) db.insert(membershipScopes, { id: newId(), ...scope, districtId: idOf(plot, person.district) });
+  if (person.account) db.insert(membershipScopes, { id: newId(), ...scope, accountId: idOf(plot, person.account) });
+}

@@ -1,0 +1,3 @@
+export const chromiumFlags: string[];
+export function findChromium(): string | null;
+export function ensureChromium(): string;
