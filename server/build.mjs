@@ -2,7 +2,7 @@
 import { build } from 'esbuild';
 
 await build({
-  entryPoints: { main: 'server/main.ts', demo: 'server/demo/main.ts', dev: 'server/dev.ts', 'producer-create': 'server/producer-create.ts' },
+  entryPoints: { main: 'server/main.ts', demo: 'server/demo/main.ts', 'producer-create': 'server/producer-create.ts' },
   outdir: 'dist/server',
   bundle: true,
   packages: 'external',

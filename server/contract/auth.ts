@@ -3,6 +3,9 @@ import { email, id, instant, language, slug, words } from './common';
 import { endpoint } from './endpoint';
 import { grants, roles, sides } from './words';
 
+/** A cookie pages may read: somebody is signed in here, so it is worth asking who. It proves nothing. */
+export const signedInMark = 'nilas.in';
+
 /** A path of this application; anything else falls back to the front page. */
 export const nextPath = z.string().check(z.maxLength(500));
 

@@ -1,14 +1,11 @@
 import { accounts, districts, freezers, installs, lanes, memberships, membershipScopes, models as modelTable, people, producerDb, producers, products, sensors, stores, type ProducerDb } from '../db';
-import type { Weekday } from '../contract/words';
+import type { Language, Weekday } from '../contract/words';
 import type { Services } from '../http/context';
-import { bagSizes, models, type DemoModel, type DemoPerson, type DemoProducer } from './data/producers';
+import { bagSizes, models, twoDoor, type DemoModel, type DemoPerson, type DemoProducer } from './data/producers';
 import { seeded, type Random } from './random';
 
 const DAY = 86_400_000;
 export const historyDays = 120;
-/** A freezer whose sensor came yesterday, and stores whose second freezer has none. */
-const newlyFitted = ['Heron Dock', 'Punta Serena'];
-const unfitted = ['Lantern Corner 14', 'Cattail Cove', 'Muelle Viejo'];
 
 /** Writes one producer with everybody and everything but its history. Answers its id. */
 export function createDemoProducer(services: Services, demo: DemoProducer): string {
@@ -48,7 +45,11 @@ function named({ ids, newId }: Plot, name: string): string {
   return id;
 }
 
-const usualDays: Weekday[][] = [[2, 5], [1, 4], [3, 6], [1, 3, 5], [2, 4, 6]];
+/** The language of a store, where it is not its producer's. */
+const spoken = (store: string, usual: Language): Language => (/Campo Verde|Esquina/.test(store) ? 'es' : /Sandbar|Cactus/.test(store) ? 'en' : usual);
+
+const usualDays: Weekday[][] = [[2, 5], [1, 4], [3, 6], [1, 3, 5], [2, 4, 6], [4, 7]];
+const driverNotes = { en: 'Gate on the left; ring for the back door.', es: 'Portón a la izquierda; toque el timbre de atrás.' };
 const kinds = ['convenience', 'fuel', 'grocery', 'bait'];
 
 function createPlaces(plot: Plot): void {
@@ -72,12 +73,12 @@ function createPlaces(plot: Plot): void {
         latitude: random.between(south?.[0] ?? 0, north?.[0] ?? 0),
         longitude: random.between(south?.[1] ?? 0, north?.[1] ?? 0),
         timeZone: 'America/Chicago',
-        language: /Campo Verde|Esquina/.test(name) ? 'es' : /Sandbar|Cactus/.test(name) ? 'en' : account.language,
+        language: spoken(name, account.language),
         phone: `555-01${String(random.whole(10, 99))}`,
         openHours: [6, 22],
         receivingHours: [{ days: [1, 2, 3, 4, 5, 6], from: '06:30', to: '15:00' }],
         deliveryDays: random.pick(usualDays),
-        driverNotes: random.chance(0.3) ? 'Gate on the left; ring for the back door.' : '',
+        driverNotes: random.chance(0.3) ? driverNotes[demo.language] : '',
         createdAt,
       });
     });
@@ -90,7 +91,7 @@ const placesAt = {
 };
 
 function createFreezers(plot: Plot): void {
-  const { db, demo, createdAt, random } = plot;
+  const { db, demo, createdAt } = plot;
   for (const pounds of bagSizes) db.insert(products, { id: named(plot, `${pounds} lb`), name: `${pounds} lb`, bagPounds: pounds, createdAt });
   for (const model of models) {
     const { name, width, depth, height, doors, rated, defrost } = model;
@@ -98,27 +99,42 @@ function createFreezers(plot: Plot): void {
   }
   let number = 0;
   demo.accounts.flatMap((account) => account.stores).forEach((store, i) => {
-    const count = i % 5 < 2 || unfitted.includes(store) ? 2 : 1;
+    const count = i % 5 < 3 ? 1 : 2;
     for (let position = 0; position < count; position += 1) {
       number += 1;
-      const fitted = !(position === 1 && unfitted.includes(store));
-      createFreezer(plot, { store, position, number, model: random.pick(models), fittedAt: fitted ? (newlyFitted.includes(store) ? plot.now - 1.1 * DAY : createdAt) : null });
+      createFreezer(plot, { store, position, number, fittedAt: fittedAt(plot, store, position) });
     }
   });
 }
 
-interface Fitted {
+/** Since when a sensor hangs in it; null where none does. */
+function fittedAt({ demo, now, createdAt }: Plot, store: string, position: number): number | null {
+  if (position === 1 && demo.unfitted.includes(store)) return null;
+  return store === demo.newlyFitted ? now - 1.1 * DAY : createdAt;
+}
+
+/** A model with its lanes: the size of bag in each and its share of the width. */
+function layoutOf({ demo, random }: Plot, store: string, position: number): { model: DemoModel; sizes: number[]; shares: number[] } {
+  const wanted = position === 0 ? demo.layouts[store] : undefined;
+  if (wanted) return { model: twoDoor, sizes: wanted, shares: [0.5, 0.5] };
+  const model = random.pick(models);
+  if (model.doors === 1 || (model.doors === 2 && random.chance(0.3))) return { model, sizes: [random.pick([7, 10])], shares: [1] };
+  if (model.doors === 3 && random.chance(0.5)) return { model, sizes: bagSizes, shares: [0.34, 0.33, 0.33] };
+  return { model, sizes: random.pick([[7, 20], [10, 20], [7, 10]]), shares: random.pick([[0.5, 0.5], [0.6, 0.4]]) };
+}
+
+interface Place {
   store: string;
   position: number;
   number: number;
-  model: DemoModel;
   fittedAt: number | null;
 }
 
-function createFreezer(plot: Plot, { store, position, number, model, fittedAt }: Fitted): void {
-  const { db, demo, random, createdAt, newId, nextSensorNo } = plot;
+function createFreezer(plot: Plot, { store, position, number, fittedAt }: Place): void {
+  const { db, demo, random, createdAt, newId } = plot;
+  const { model, sizes, shares } = layoutOf(plot, store, position);
   const outdoor = position === 1 || random.chance(0.4);
-  const words = placesAt[demo.language];
+  const words = placesAt[spoken(store, demo.language)];
   const freezerId = newId();
   db.insert(freezers, {
     id: freezerId,
@@ -134,16 +150,17 @@ function createFreezer(plot: Plot, { store, position, number, model, fittedAt }:
     position,
     createdAt,
   });
-  const shares = model.doors === 1 ? [1] : model.doors === 3 ? random.pick([[0.34, 0.33, 0.33], [0.5, 0.5]]) : random.pick([[0.5, 0.5], [0.6, 0.4], [1]]);
-  const sizes = shares.length === 3 ? bagSizes : shares.length === 1 ? [random.pick([10, 7])] : random.pick([[7, 20], [10, 20], [7, 10]]);
   shares.forEach((widthShare, lane) =>
     db.insert(lanes, { id: newId(), freezerId, position: lane, productId: idOf(plot, `${sizes[lane] ?? 10} lb`), widthShare }),
   );
-  if (fittedAt === null) return;
+  if (fittedAt !== null) fitSensor(plot, { freezerId, number, fittedAt, width: model.width });
+}
+
+function fitSensor({ db, demo, newId, nextSensorNo }: Plot, { freezerId, number, fittedAt, width }: { freezerId: string; number: number; fittedAt: number; width: number }): void {
   const sensorId = newId();
   const serial = `${demo.serialPrefix}${String(number).padStart(4, '0')}`;
   db.insert(sensors, { id: sensorId, no: nextSensorNo(), serial, firstHeardAt: fittedAt, createdAt: fittedAt });
-  const probesIn = [0.18, 0.5, 0.82].map((share) => Math.round(share * model.width * 2) / 2);
+  const probesIn = [0.18, 0.5, 0.82].map((share) => Math.round(share * width * 2) / 2);
   db.insert(installs, { id: newId(), sensorId, freezerId, probesIn, from: fittedAt });
 }
 

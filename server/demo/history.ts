@@ -1,61 +1,78 @@
-import { deliveries, deliveryLines, desc, eq, inArray, nextTruckLoads, nextTrucks, readings as readingTable, sensors, type Database, type ProducerDb } from '../db';
-import type { Services } from '../http/context';
+import { and, deliveries, deliveryLines, desc, eq, lte, nextTruckLoads, nextTrucks, readings as readingTable, sensors, sql, type Database, type ProducerDb } from '../db';
+import { membersByRole } from '../db/views/people';
+import { dayOf } from '../domain/civil';
 import { refreshState } from '../telemetry/refresh-state';
 import type { RawReading } from '../telemetry/readings-of';
-import type { FleetFreezer, Drop, Memory } from './simulation';
-import { nextTruckOf, type DemoStore } from './trucks';
+import type { Drop, FleetFreezer } from './simulation';
+import { nextTruckOf, type DemoStore, type Staged } from './trucks';
 
-const BATCH = 500;
-
-/** Readings of the past, written behind the door's age limit; states are worked out once at the end. */
-export function writeReadings(db: Database, scoped: ProducerDb, freezer: FleetFreezer, list: RawReading[]): void {
-  const sensor = scoped.select({ no: sensors.no }).from(sensors).where(eq(sensors.serial, freezer.serial)).get();
-  if (!sensor) throw new Error(`no sensor ${freezer.serial}`);
-  for (let from = 0; from < list.length; from += BATCH) {
-    const rows = list.slice(from, from + BATCH).map(({ at, probes, airC, supplyV, conflict }) => ({ sensorNo: sensor.no, at, probes, airC, supplyV, conflict }));
-    db.insert(readingTable).values(rows).onConflictDoNothing().run();
-  }
-  refreshState(db, scoped, freezer.id);
+/** Writes readings of the past, which the door would find too old; what they mean is worked out once for each freezer. */
+export function historyWriter(db: Database, scoped: ProducerDb): (freezer: FleetFreezer, list: RawReading[]) => void {
+  const { placeholder } = sql;
+  const row = { sensorNo: placeholder('sensorNo'), at: placeholder('at'), probes: placeholder('probes'), airC: placeholder('airC'), supplyV: placeholder('supplyV') };
+  const insert = db.insert(readingTable).values(row).onConflictDoNothing().prepare();
+  return (freezer, list) => {
+    const sensor = scoped.select({ no: sensors.no }).from(sensors).where(eq(sensors.serial, freezer.serial)).get();
+    if (!sensor) throw new Error(`no sensor ${freezer.serial}`);
+    for (const { at, probes, airC, supplyV } of list) insert.run({ sensorNo: sensor.no, at, probes, airC, supplyV });
+    refreshState(db, scoped, freezer.id);
+  };
 }
 
-/** One delivery for each store and truck, whatever freezers it filled. */
+/** One delivery for each store and truck, whatever freezers it filled; the same drops again change nothing. */
 export function writeDeliveries(scoped: ProducerDb, newId: () => string, lotPrefix: string, drops: Drop[]): void {
+  const recordedBy = membersByRole(scoped, ['driver'])[0]?.id ?? null;
   const visits = new Map<string, Drop[]>();
-  for (const drop of drops) visits.set(`${drop.storeId} ${drop.at}`, [...(visits.get(`${drop.storeId} ${drop.at}`) ?? []), drop]);
+  for (const drop of drops) {
+    const key = `${drop.storeId} ${drop.truck.at}`;
+    visits.set(key, [...(visits.get(key) ?? []), drop]);
+  }
   for (const visit of visits.values()) {
     const [first] = visit;
     if (!first || visit.every(({ lines }) => lines.length === 0)) continue;
+    const { storeId, truck } = first;
+    const { at, from, to } = truck;
+    if (scoped.select({ id: deliveries.id }).from(deliveries).where(and(eq(deliveries.storeId, storeId), eq(deliveries.at, at))).get()) continue;
     const id = newId();
-    const { storeId, at, from, to } = first;
-    scoped.insert(deliveries, { id, storeId, at, toldFrom: from, toldTo: to, createdAt: at });
-    const lot = `${lotPrefix}-${new Date(at - 86_400_000).toISOString().slice(5, 10).replace('-', '')}`;
+    scoped.insert(deliveries, { id, storeId, at, toldFrom: from, toldTo: to, recordedBy, createdAt: at });
     for (const { freezerId, lines } of visit) {
-      for (const line of lines) scoped.insert(deliveryLines, { id: newId(), deliveryId: id, freezerId, lot, ...line });
+      for (const { productId, bagPounds, bags, takenBack } of lines) {
+        scoped.insert(deliveryLines, { id: newId(), deliveryId: id, freezerId, productId, bags, takenBack, lot: lotOf(lotPrefix, at, bagPounds) });
+      }
     }
+    removeTrucks(scoped, storeId, truck.day);
   }
 }
 
-/** Sets each store's next truck; a store whose truck did not come keeps the one it waits for. */
-export function setNextTrucks({ newId }: Pick<Services, 'newId'>, scoped: ProducerDb, stores: DemoStore[], memory: Memory, now: number): void {
-  const waiting = memory.troubles.waiting;
-  const due = stores.filter((store) => !(store.id in waiting));
-  const known = scoped.select({ id: nextTrucks.id, storeId: nextTrucks.storeId, day: nextTrucks.day }).from(nextTrucks).all();
-  for (const store of due) {
-    const truck = nextTruckOf(store, now);
-    const current = known.find(({ storeId }) => storeId === store.id);
-    if (!truck || current?.day === truck.day) continue;
-    if (current) {
-      scoped.delete(nextTruckLoads, inArray(nextTruckLoads.nextTruckId, [current.id]));
-      scoped.delete(nextTrucks, eq(nextTrucks.id, current.id));
-    }
+/** Bagged the day before, small and large bags on different lines. */
+const lotOf = (prefix: string, at: number, bagPounds: number): string =>
+  `${prefix}-${new Date(at - 86_400_000).toISOString().slice(5, 10).replace('-', '')}-${bagPounds < 10 ? 1 : 2}`;
+
+/** Tells each store that waits for no truck of today or later when its next one comes; what a dispatcher set stands. */
+export function setNextTrucks(scoped: ProducerDb, newId: () => string, stores: DemoStore[], staged: Record<string, Staged>, now: number): void {
+  const told = new Map(scoped.select({ storeId: nextTrucks.storeId, day: nextTrucks.day }).from(nextTrucks).all().map(({ storeId, day }) => [storeId, day]));
+  for (const store of stores) {
+    const today = dayOf(now, store.timeZone);
+    if ((told.get(store.id) ?? '') >= today) continue;
+    const truck = nextTruckOf(store, staged[store.id], now);
+    if (!truck || told.get(store.id) === truck.day) continue;
+    removeTrucks(scoped, store.id, today);
     const id = newId();
     scoped.insert(nextTrucks, { id, storeId: store.id, day: truck.day, from: truck.from, to: truck.to, updatedAt: now });
     for (const { productId, bags } of usualLoad(scoped, store.id)) scoped.insert(nextTruckLoads, { id: newId(), nextTruckId: id, productId, bags });
   }
 }
 
+function removeTrucks(scoped: ProducerDb, storeId: string, upTo: string): void {
+  const over = scoped.select({ id: nextTrucks.id }).from(nextTrucks).where(and(eq(nextTrucks.storeId, storeId), lte(nextTrucks.day, upTo))).all();
+  for (const { id } of over) {
+    scoped.delete(nextTruckLoads, eq(nextTruckLoads.nextTruckId, id));
+    scoped.delete(nextTrucks, eq(nextTrucks.id, id));
+  }
+}
+
 /** As much as the last truck brought. */
-export function usualLoad(scoped: ProducerDb, storeId: string): { productId: string; bags: number }[] {
+function usualLoad(scoped: ProducerDb, storeId: string): { productId: string; bags: number }[] {
   const last = scoped.select({ id: deliveries.id }).from(deliveries).where(eq(deliveries.storeId, storeId)).orderBy(desc(deliveries.at)).limit(1).get();
   if (!last) return [];
   const load = new Map<string, number>();

@@ -6,7 +6,6 @@ import { demoPeople } from '../features/dev/demo-people';
 import type { Services } from '../http/context';
 import { start, stopOnSignal } from '../start';
 import { catchUp, play } from './play';
-import { fleetOf } from './simulation';
 import { openWorld, type Played } from './world';
 
 /** `npm run demo`: the portal with the invented world in it, which goes on living unless `--no-play` is given. */
@@ -20,22 +19,15 @@ const played = await openWorld(services, (what) => process.stderr.isTTY && proce
 await catchUp(services, local, played);
 writeDemoFile(services, played);
 print(services, played, Date.now() - began);
-if (!process.argv.includes('--no-play')) {
-  const job = play(services, local, played);
-  const stop = running.stop;
-  running.stop = async () => {
-    await job.stop();
-    await stop();
-  };
-}
+if (!process.argv.includes('--no-play')) play(running, local, played);
 stopOnSignal(running);
 
 function writeDemoFile({ db, config }: Services, worlds: Played[]): void {
   const people = demoPeople(db).map(({ role, email, language, slug }) => ({ role, email, language, producer: slug, signInUrl: signInUrl(email) }));
-  const telemetry = worlds.map(({ demo, key, scoped, memory }) => ({
+  const telemetry = worlds.map(({ demo, key, fleet }) => ({
     producer: demo.slug,
     key,
-    sensors: fleetOf(scoped, memory.troubles).map(({ id, serial, simulated }) => ({ urn: serial, freezerId: id, probes: simulated.setup.mount.probesIn.length })),
+    sensors: fleet.map(({ id, serial, simulated }) => ({ urn: serial, freezerId: id, probes: simulated.setup.mount.probesIn.length })),
   }));
   writeFileSync(path.join(config.dataDir, 'demo.json'), `${JSON.stringify({ url, people, telemetry }, null, 2)}\n`, { mode: 0o600 });
 }

@@ -7,18 +7,41 @@ import { demoRequests, type DemoRequest } from './data/requests';
 const HOUR = 3_600_000;
 const FIRST_NUMBER = 2186;
 
-/** Service requests in every state, with what was said about them. */
-export async function createRequests(services: Services, scoped: ProducerDb, slug: string): Promise<void> {
-  const list = [...(demoRequests[slug] ?? [])].sort((a, b) => b.openedAgo - a.openedAgo);
-  const pictures = new Map<string, Buffer>();
-  for (const { photo } of list) if (photo) pictures.set(photo, await drawn(photo));
-  for (const [i, request] of list.entries()) {
-    const file = request.photo ? `${services.newId()}.jpg` : null;
-    const bytes = pictures.get(request.photo ?? '');
-    if (file && bytes) await services.storage.put(file, bytes);
-    services.db.$client.transaction(() => createRequest(services, scoped, request, FIRST_NUMBER + i, file))();
+/** Puts the photos of the demo's requests into storage; answers their file names by picture and request. */
+export async function keepPictures({ storage, newId }: Services, slug: string): Promise<Map<DemoRequest, string>> {
+  const files = new Map<DemoRequest, string>();
+  for (const request of demoRequests[slug] ?? []) {
+    if (!request.photo) continue;
+    const file = `${newId()}.jpg`;
+    await storage.put(file, await drawn(request.photo));
+    files.set(request, file);
   }
+  return files;
+}
+
+/** Service requests in every state, with what was said about them. */
+export function createRequests(services: Services, scoped: ProducerDb, slug: string, pictures: Map<DemoRequest, string>): void {
+  const list = [...(demoRequests[slug] ?? [])].sort((a, b) => b.openedAgo - a.openedAgo);
+  list.forEach((request, i) => createRequest(services, scoped, request, FIRST_NUMBER + i, pictures.get(request) ?? null));
   scoped.insert(counters, { id: 'request', value: FIRST_NUMBER + list.length - 1 });
+}
+
+/** A visit that was due while the demo stood still is tomorrow. */
+export function putOffVisits({ newId, now }: Services, scoped: ProducerDb): void {
+  const at = now();
+  const scheduled = scoped
+    .select({ id: requests.id, day: requests.scheduledDay, version: requests.version, assigneeId: requests.assigneeId, timeZone: stores.timeZone })
+    .from(requests)
+    .innerJoin(stores, eq(stores.id, requests.storeId))
+    .where(eq(requests.state, 'scheduled'))
+    .all();
+  for (const { id, day, version, assigneeId, timeZone } of scheduled) {
+    const today = dayOf(at, timeZone);
+    if (day === null || day >= today) continue;
+    const tomorrow = addDays(today, 1);
+    scoped.update(requests, id, { scheduledDay: tomorrow, version: version + 1, changedAt: at });
+    scoped.insert(requestEntries, { id: newId(), requestId: id, at, authorId: assigneeId, kind: 'state', state: 'scheduled', day: tomorrow });
+  }
 }
 
 function createRequest({ newId, now }: Services, scoped: ProducerDb, request: DemoRequest, number: number, file: string | null): void {

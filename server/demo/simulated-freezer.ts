@@ -9,9 +9,10 @@ export interface SimulatedFreezer {
   dailyPounds: number[];
   defrosts: boolean;
   outdoor: boolean;
-  /** The compressor stopped then. */
-  brokeAt: number | null;
 }
+
+/** Null while its compressor runs, or the time it stopped. */
+export type Failing = SimulatedFreezer & { brokeAt: number | null };
 
 export interface Truth {
   pounds: number[];
@@ -38,8 +39,8 @@ export interface Moment {
 const PROFILE = [0, 0, 0, 0, 0, 1, 2, 4, 5, 5, 6, 7, 7, 7, 8, 8, 9, 9, 8, 6, 4, 2, 1, 1];
 const PROFILE_SUM = PROFILE.reduce((sum, share) => sum + share, 0);
 const WEEKDAY = [0.85, 0.85, 0.9, 1, 1.25, 1.35, 1.1];
-const NOISE_IN = 0.25;
-const TOPS_SD_IN = 0.9;
+const NOISE_IN = 0.3;
+const TOPS_SD_IN = 0.6;
 
 export const stocked = ({ setup, dailyPounds }: SimulatedFreezer, random: Random): Truth => ({
   pounds: dailyPounds.map((_, lane) => wholeBags(setup, lane, capacityOf(setup, lane) * random.between(0.3, 0.95))),
@@ -67,18 +68,21 @@ export function sell({ setup, dailyPounds }: SimulatedFreezer, truth: Truth, { h
   return { pounds, tops: truth.tops.map((top) => top * 0.995 + random.normal(TOPS_SD_IN * 0.1)) };
 }
 
-/** The truck fills each lane to about nine tenths; answers the bags brought, by lane. */
-export function refill({ setup }: SimulatedFreezer, truth: Truth, random: Random): { truth: Truth; bags: number[] } {
+/** The truck fills each lane to about nine tenths, but has no bags of the missing size; answers the bags brought, by lane. */
+export function refill({ setup }: SimulatedFreezer, truth: Truth, random: Random, missing: number | null): { truth: Truth; bags: number[] } {
   const bags = truth.pounds.map((left, lane) => {
     const room = capacityOf(setup, lane) * random.between(0.86, 0.98) - left;
-    return Math.max(0, laneOf(setup, lane, ({ bagPounds }) => Math.floor(room / bagPounds)));
+    return laneOf(setup, lane, ({ bagPounds }) => (bagPounds === missing ? 0 : Math.max(0, Math.floor(room / bagPounds))));
   });
   const pounds = truth.pounds.map((left, lane) => left + (bags[lane] ?? 0) * laneOf(setup, lane, ({ bagPounds }) => bagPounds));
   return { truth: { pounds, tops: truth.tops.map(() => random.normal(TOPS_SD_IN)) }, bags };
 }
 
+/** Few bags lie flat. */
+const EVEN_UP_TO_IN = 6;
+
 /** What the sensor says of it: uneven tops, probe noise, an arm or an open door now and then, a word that got lost. */
-export function sense(freezer: SimulatedFreezer, truth: Truth, moment: Moment, random: Random): Seen {
+export function sense(freezer: Failing, truth: Truth, moment: Moment, random: Random): Seen {
   const { setup } = freezer;
   const { insideHeightIn, insideWidthIn } = setup.model;
   const floor = insideHeightIn - setup.mount.channelDropIn - setup.mount.rackIn;
@@ -86,10 +90,10 @@ export function sense(freezer: SimulatedFreezer, truth: Truth, moment: Moment, r
     const stack = Math.max(...lanesUnder(setup, x / insideWidthIn).map((lane) => (truth.pounds[lane] ?? 0) / laneOf(setup, lane, (one) => priorPoundsPerInch(setup, one))));
     if (random.chance(0.004)) return null;
     if (moment.open && random.chance(0.004)) return random.between(2, 9);
-    const uneven = stack > 3 ? (truth.tops[probe] ?? 0) : 0;
+    const uneven = (truth.tops[probe] ?? 0) * Math.min(1, stack / EVEN_UP_TO_IN);
     return Math.min(floor + 0.5, Math.max(0.4, floor - stack - uneven + random.normal(NOISE_IN)));
   });
-  return { distancesIn, airF: airOf(freezer, moment, random), supplyV: 11.9 + random.normal(0.06) };
+  return { distancesIn, airF: airOf(freezer, truth, moment, random), supplyV: 11.9 + random.normal(0.06) };
 }
 
 const BOUNDARY = 0.03;
@@ -104,15 +108,17 @@ function lanesUnder({ lanes }: FreezerSetup, at: number): number[] {
 }
 
 const SET_F = 17;
-const WARMING_MS = 7 * 3_600_000;
+/** Hours until a dead freezer's air is most of the way to where it settles. */
+const WARMING_HOURS = 2;
 
-function airOf({ defrosts, outdoor, brokeAt }: SimulatedFreezer, { at, hour, open }: Moment, random: Random): number {
+/** The compressor's cycle, defrosts and doors; without it, up to a little above melting ice, or the surroundings once all is gone. */
+function airOf({ defrosts, outdoor, brokeAt }: Failing, { pounds }: Truth, { at, hour, open }: Moment, random: Random): number {
   const cycle = 1.4 * Math.sin((at / 3_600_000) * 2 * Math.PI * 1.7);
   const defrost = defrosts && hour % 8 < 0.5 ? 9 : 0;
   const door = open && random.chance(0.06) ? random.between(2, 7) : 0;
   const running = SET_F + cycle + defrost + door + random.normal(0.4);
   if (brokeAt === null || at < brokeAt) return running;
-  const ambient = outdoor ? 84 : 72;
-  return ambient - (ambient - SET_F) * Math.exp(-(at - brokeAt) / WARMING_MS) + random.normal(0.3);
+  const ambient = outdoor ? 78 : 72;
+  const settles = pounds.some((left) => left > 0) ? 32 + 0.15 * (ambient - 32) : ambient;
+  return settles - (settles - SET_F) * Math.exp(-(at - brokeAt) / (WARMING_HOURS * 3_600_000)) + random.normal(0.3);
 }
-

@@ -1,99 +1,89 @@
-import { existsSync, readFileSync, writeFileSync } from 'node:fs';
-import path from 'node:path';
 import { abilityFor } from '../contract/ability';
-import { isNull, producerDb, stores, type ProducerDb } from '../db';
+import { freezerStates, producerDb, type ProducerDb } from '../db';
 import { newTelemetryKey } from '../features/telemetry/new-key';
 import type { Services } from '../http/context';
 import { runAction } from '../http/run-action';
 import { createDemoProducer, historyDays } from './create';
 import { demoProducers, type DemoProducer } from './data/producers';
-import { setNextTrucks, writeDeliveries, writeReadings } from './history';
-import { createRequests } from './requests';
-import { fleetOf, live, type Memory } from './simulation';
-import { trucksOf } from './trucks';
+import { historyWriter, setNextTrucks, writeDeliveries } from './history';
+import { createRequests, keepPictures } from './requests';
+import { keep, kept } from './kept';
+import { fleetOf, live, newMemory, storesOf, type FleetFreezer, type Memory } from './simulation';
+import { noTroubles, troublesAt } from './troubles';
 
-const HOUR = 3_600_000;
-const DAY = 24 * HOUR;
+const DAY = 86_400_000;
 const rawDays = 60;
 
-/** One producer as it is played: its door's key, its data, and the truth behind its sensors. */
+/** One producer as it is played: its door's key, its data, its freezers, and the truth behind their sensors. */
 export interface Played {
   demo: DemoProducer;
-  producerId: string;
   key: string;
   scoped: ProducerDb;
+  fleet: FleetFreezer[];
   memory: Memory;
 }
 
-interface Kept {
-  producers: { slug: string; key: string; memory: Memory }[];
-}
-
-const fileOf = ({ config }: Services): string => path.join(config.dataDir, 'simulator.json');
-
 /** The world as it stands, made first where it is missing. `progress` is told what is under way. */
 export async function openWorld(services: Services, progress: (what: string) => void): Promise<Played[]> {
-  const kept = existsSync(fileOf(services)) ? (JSON.parse(readFileSync(fileOf(services), 'utf8')) as Kept) : null;
+  const known = kept(services.config.dataDir);
   const played: Played[] = [];
   for (const demo of demoProducers) {
-    const known = kept?.producers.find(({ slug }) => slug === demo.slug);
     const producer = services.system.producerBySlug(demo.slug);
-    if (known && producer) {
-      played.push({ demo, producerId: producer.id, key: known.key, memory: known.memory, scoped: producerDb(services.db, producer.id) });
-    } else {
-      progress(`making ${demo.name}`);
-      played.push(await makeProducer(services, demo, progress));
-    }
+    if (!producer) progress(`making ${demo.name}`);
+    played.push(producer ? reopened(services, demo, producer.id, known.get(demo.slug)) : await makeProducer(services, demo, progress));
   }
-  keepMemory(services, played);
+  keep(services.config.dataDir, played);
   return played;
 }
 
-export function keepMemory(services: Services, played: Played[]): void {
-  const kept: Kept = { producers: played.map(({ demo, key, memory }) => ({ slug: demo.slug, key, memory })) };
-  writeFileSync(fileOf(services), JSON.stringify(kept), { mode: 0o600 });
+/** Without what was kept, the truth is taken from the levels as last known, under a new key. */
+function reopened(services: Services, demo: DemoProducer, producerId: string, known: { key: string; memory: Memory } | undefined): Played {
+  const scoped = producerDb(services.db, producerId);
+  const fleet = fleetOf(scoped, demo.troubles.hungry);
+  const memory = known?.memory ?? recalled(scoped, fleet, services.now());
+  return { demo, key: known?.key ?? makeKey(services, producerId), scoped, fleet, memory };
 }
 
-async function makeProducer(services: Services, demo: DemoProducer, progress: (what: string) => void): Promise<Played> {
-  const { db, newId, now } = services;
-  const at = now();
-  const producerId = db.$client.transaction(() => createDemoProducer(services, demo))();
-  const scoped = producerDb(db, producerId);
-  const memory: Memory = { at: {}, truths: {}, troubles: { broken: {}, silent: {}, waiting: {} } };
-  makeTroubles(scoped, memory, at);
-  const fleet = fleetOf(scoped, memory.troubles);
-  progress(`${fleet.length} freezers live through ${historyDays} days`);
-  const drops = fleet.flatMap((freezer) => {
-    const { readings, drops: left } = live(freezer, memory, at - historyDays * DAY, at);
-    db.$client.transaction(() => writeReadings(db, scoped, freezer, readings.filter((reading) => reading.at > at - rawDays * DAY)))();
-    return left;
-  });
-  db.$client.transaction(() => {
-    writeDeliveries(scoped, newId, demo.slug === 'kestrel-bend' ? 'KB' : 'PC', drops);
-    setNextTrucks(services, scoped, storesOf(scoped), memory, at);
+function recalled(scoped: ProducerDb, fleet: FleetFreezer[], now: number): Memory {
+  const memory = newMemory();
+  for (const { id, serial, simulated } of fleet) {
+    const found = scoped.find(freezerStates, id);
+    memory.at[serial] = found?.at ?? now;
+    if (!found) continue;
+    const pounds = simulated.setup.lanes.map(({ bagPounds }, lane) => (found.state.level.lanes[lane]?.bags ?? 0) * bagPounds);
+    memory.truths[serial] = { pounds, tops: simulated.setup.mount.probesIn.map(() => 0) };
+  }
+  return memory;
+}
+
+/** In one transaction, so that a demo stopped while it is made is made anew. */
+export async function makeProducer(services: Services, demo: DemoProducer, progress: (what: string) => void = () => {}): Promise<Played> {
+  const pictures = await keepPictures(services, demo.slug);
+  return services.db.$client.transaction(() => {
+    const producerId = createDemoProducer(services, demo);
+    const scoped = producerDb(services.db, producerId);
+    const fleet = fleetOf(scoped, demo.troubles.hungry);
+    progress(`${fleet.length} freezers live through ${historyDays} days`);
+    const memory = liveThrough(services, demo, scoped, fleet);
+    createRequests(services, scoped, demo.slug, pictures);
+    return { demo, key: makeKey(services, producerId), scoped, fleet, memory };
   })();
-  await createRequests(services, scoped, demo.slug);
-  return { demo, producerId, key: makeKey(services, producerId), scoped, memory };
 }
 
-export const storesOf = (scoped: ProducerDb) =>
-  scoped.select({ id: stores.id, name: stores.name, timeZone: stores.timeZone, deliveryDays: stores.deliveryDays }).from(stores).where(isNull(stores.retiredAt)).all();
-
-/** A dead compressor, a sensor that fell silent yesterday, and a truck that did not come. */
-function makeTroubles(scoped: ProducerDb, { troubles }: Memory, now: number): void {
-  const fleet = fleetOf(scoped, troubles);
-  const at = (name: string) => fleet.find(({ store }) => store.name === name)?.serial;
-  for (const name of ['Ozark Lane Grocery', 'La Gaviota 3']) {
-    const serial = at(name);
-    if (serial) troubles.broken[serial] = now - 4.5 * HOUR;
-  }
-  for (const name of ['Pelican Row Market', 'Abarrotes Mezquite']) {
-    const serial = at(name);
-    if (serial) troubles.silent[serial] = now - 19 * HOUR;
-  }
-  const waits = storesOf(scoped).find((store) => store.name === 'Marlow Bridge Mart' || store.name === 'Gasolinera Marea');
-  const missed = waits && trucksOf(waits, now - 8 * DAY, now - 2 * HOUR).at(-1);
-  if (waits && missed) troubles.waiting[waits.id] = missed.at;
+function liveThrough({ db, newId, now }: Services, demo: DemoProducer, scoped: ProducerDb, fleet: FleetFreezer[]): Memory {
+  const at = now();
+  const memory: Memory = { ...newMemory(), troubles: troublesAt(at, demo, fleet, noTroubles) };
+  const write = historyWriter(db, scoped);
+  const drops = fleet.flatMap((freezer) => {
+    const lived = live(freezer, memory, { from: at - historyDays * DAY, speakFrom: at - rawDays * DAY, to: at });
+    write(freezer, lived.readings);
+    memory.truths[freezer.serial] = lived.truth;
+    memory.at[freezer.serial] = lived.at;
+    return lived.drops;
+  });
+  writeDeliveries(scoped, newId, demo.lotPrefix, drops);
+  setNextTrucks(scoped, newId, storesOf(scoped), memory.troubles.staged, at);
+  return memory;
 }
 
 function makeKey(services: Services, producerId: string): string {
@@ -101,4 +91,3 @@ function makeKey(services: Services, producerId: string): string {
   const ability = abilityFor({ personId: '', membershipId: '', role: 'producer-admin', side: 'producer', storeIds: [], grants: [] });
   return runAction(services, { producerId, id: 'operator', ability }, 'create-telemetry-key', at, (tx) => newTelemetryKey(tx, services.newId(), 'demo sensors', at));
 }
-

@@ -10,7 +10,7 @@ export function readCursor(after: string | undefined, types: ('string' | 'number
   if (after === undefined) return null;
   const cursor = parsed(after);
   const fits = Array.isArray(cursor) && cursor.length === types.length && types.every((type, i) => typeof cursor[i] === type);
-  if (!fits) throw problem('bad-input', undefined, [{ pointer: '/query/after', fault: 'cursor' }]);
+  if (!fits) throw problem('bad-input', undefined, [{ pointer: '/query/after', fault: 'invalid' }]);
   return cursor as Cursor;
 }
 

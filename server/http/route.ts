@@ -109,12 +109,15 @@ function parse(schema: z.ZodMiniType | undefined, value: unknown, at: string): u
 }
 
 function faultOf(issue: z.core.$ZodIssue, at: string): FieldFault[] {
-  const pointer = [at, ...issue.path.map((key) => String(key).replace(/~/g, '~0').replace(/\//g, '~1'))].join('/');
-  if (issue.code === 'unrecognized_keys') return issue.keys.map((key) => ({ pointer: `${pointer}/${key}`, fault: 'unknown-field' }));
+  const pointer = [at, ...issue.path.map(escaped)].join('/');
+  if (issue.code === 'unrecognized_keys') return issue.keys.map((key) => ({ pointer: `${pointer}/${escaped(key)}`, fault: 'unknown-field' }));
   if (issue.code === 'too_big') return [{ pointer, fault: known(issue.message), params: { most: Number(issue.maximum) } }];
   if (issue.code === 'too_small') return [{ pointer, fault: known(issue.message), params: { least: Number(issue.minimum) } }];
   return [{ pointer, fault: known(issue.message) }];
 }
+
+/** A step of a JSON pointer (RFC 6901 section 3). */
+const escaped = (key: PropertyKey): string => String(key).replace(/~/g, '~0').replace(/\//g, '~1');
 
 /** Faults written in the contract are keys; the library's own English never leaves the server. */
 const known = (message: string): string => (/^[a-z][a-z-]*$/.test(message) ? message : 'invalid');

@@ -1,4 +1,3 @@
-import { useMemo } from 'react';
 import { Area, CartesianGrid, ComposedChart, Line, XAxis, YAxis } from 'recharts';
 import type { Language } from '../../server/contract/words';
 import { CoverRibbonSkeleton, ribbonHeight } from './cover-ribbon-skeleton';
@@ -37,23 +36,24 @@ interface DrawingProps {
 }
 
 const still = { isAnimationActive: false, dot: false, activeDot: false } as const;
+/** Above the plot stand "now" and the truck's words, below it the days. */
+const wordsAbove = 26;
+const plotHeight = 116;
+const percentTick = { fill: 'var(--ink-3)', fontSize: 11 };
 
 function Drawing({ data, width, height, locale }: DrawingProps) {
   const span = spanOf(data);
-  const days = daysOf(span, data);
-  const { history, forecast } = data;
-  const rows = useMemo(() => rowsOf({ from: span.from, to: span.to }, { ...data, history, forecast }), [span.from, span.to, data, history, forecast]);
-  const margin = { top: 26, right: 6, bottom: height - 26 - 116, left: 0 };
+  const margin = { top: wordsAbove, right: 6, bottom: height - wordsAbove - plotHeight, left: 0 };
   return (
-    <ComposedChart data={rows} width={width} height={height} margin={margin} accessibilityLayer={false}>
+    <ComposedChart data={rowsOf(span, data)} width={width} height={height} margin={margin} accessibilityLayer={false}>
       <CartesianGrid vertical={false} horizontalValues={[0, 50, 100]} stroke="var(--rule)" />
       <XAxis dataKey="at" type="number" domain={[span.from, span.to]} allowDataOverflow hide />
-      <YAxis domain={[0, 100]} ticks={[0, 50, 100]} width={38} axisLine={false} tickLine={false} tickFormatter={(value: number) => `${value}%`} tick={{ fill: 'var(--ink-3)', fontSize: 11 }} />
+      <YAxis domain={[0, 100]} ticks={[0, 50, 100]} width={38} axisLine={false} tickLine={false} tickFormatter={(value: number) => `${value}%`} tick={percentTick} />
       <RibbonBack data={data} span={span} />
       <Area dataKey="past" type="linear" stroke="var(--fjord)" strokeWidth={2} fill="var(--ice)" fillOpacity={0.75} {...still} />
       <Area dataKey="band" type="linear" stroke="none" fill="var(--fjord-2)" fillOpacity={0.2} {...still} />
       <Line dataKey="likely" type="linear" stroke="var(--fjord)" strokeWidth={2} strokeDasharray="5 4" {...still} />
-      <RibbonFront data={data} span={span} days={days} locale={locale} />
+      <RibbonFront data={data} span={span} days={daysOf(span, data)} locale={locale} />
     </ComposedChart>
   );
 }

@@ -117,7 +117,7 @@ function LaneWords({ box: { lane, stack, centre }, y }: { box: LaneBox; y: numbe
   const { t } = useTranslation('freezer');
   const { number } = useFormat();
   const tight = stack.width < 64;
-  const count = t(lane.about ? 'section.count-about' : 'section.count', { bags: number(lane.bags) });
+  const count = t(lane.about ? 'section.count-about' : 'section.count', { count: lane.bags, bags: number(lane.bags) });
   const lines = [lane.bags > 0 && count, lane.bags === 0 ? t('section.empty') : lane.low && t('section.low')].filter((line) => line !== false);
   return (
     <g textAnchor="middle" className={`${tight ? 'text-[11px]' : 'text-[12px]'} ${lane.low ? 'fill-ember' : 'fill-ink'}`}>

@@ -1,6 +1,6 @@
 import { useTranslation } from 'react-i18next';
 import type { Language } from '../../server/contract/words';
-import { formatIn } from '../lib/format';
+import { formatIn, type Format } from '../lib/format';
 import { daysOf, spanOf, type ForecastPoint, type RibbonData } from './ribbon-data';
 
 interface Props {
@@ -8,49 +8,14 @@ interface Props {
   locale: Language;
 }
 
-/** The ribbon for those who hear the page: what it says, then its points. */
+/** The ribbon for those who hear the page: what it says, then its points in order. */
 export function RibbonSaid({ data, locale }: Props) {
   const { t } = useTranslation('freezer');
-  const { percent, pounds, date, when, window, degrees } = formatIn({ locale, timeZone: data.timeZone });
-  const { history, forecast, deliveries, truck, empty } = data;
-  const shares = ({ likely, low, high }: ForecastPoint) => ({ likely: percent(likely), low: percent(low), high: percent(high) });
-  const span = spanOf(data);
-  const days = daysOf(span, data);
-  const level = history.at(-1);
-  const end = forecast.at(-1);
-
-  const sentences = [
-    level ? t('ribbon.said.level', { share: percent(level[1]) }) : t('ribbon.said.no-level'),
-    truck ? t('ribbon.said.truck', { when: window(truck) }) : t('ribbon.said.no-truck'),
-    empty && t('ribbon.said.empty', { from: when(empty.from), to: when(empty.to) }),
-    end && t('ribbon.said.late', { when: date(end.at), ...shares(end) }),
-  ];
-  const points = [
-    ...days.flatMap(({ start }, i) => {
-      const next = days[i + 1]?.start ?? span.to;
-      const last = history.findLast(([at]) => at >= start && at < next);
-      return last ? [{ at: last[0], words: t('ribbon.points.past', { when: date(last[0]), share: percent(last[1]) }) }] : [];
-    }),
-    ...deliveries
-      .filter(({ at }) => at >= span.from)
-      .map((delivery) => ({
-        at: delivery.at,
-        words:
-          delivery.pounds === undefined
-            ? t('ribbon.points.delivery', { when: when(delivery.at) })
-            : t('ribbon.points.delivery-pounds', { when: when(delivery.at), pounds: pounds(delivery.pounds) }),
-      })),
-    ...days.flatMap(({ middle }) => {
-      const point = forecast.find(({ at }) => at >= middle);
-      return point && middle > data.now ? [{ at: middle, words: t('ribbon.points.ahead', { when: date(middle), ...shares(point) }) }] : [];
-    }),
-    ...days.flatMap(({ middle, high }) =>
-      high === null ? [] : [{ at: middle + 1, words: t('ribbon.points.high', { when: date(middle), high: degrees(high) }) }],
-    ),
-  ].sort((a, b) => a.at - b.at);
+  const format = formatIn({ locale, timeZone: data.timeZone });
+  const points = usePoints(data, format);
   return (
     <div className="sr-only">
-      <p>{sentences.filter(Boolean).join(' ')}</p>
+      <p>{useSentences(data, format).join(' ')}</p>
       <p>{t('ribbon.points.title')}</p>
       <ul>
         {points.map(({ at, words }) => (
@@ -60,3 +25,43 @@ export function RibbonSaid({ data, locale }: Props) {
     </div>
   );
 }
+
+function useSentences({ history, forecast, truck, empty }: RibbonData, format: Format): string[] {
+  const { t } = useTranslation('freezer');
+  const level = history.at(-1);
+  const end = forecast.at(-1);
+  return [
+    level ? t('ribbon.said.level', { share: format.percent(level[1]) }) : t('ribbon.said.no-level'),
+    truck ? t('ribbon.said.truck', { when: format.window(truck) }) : t('ribbon.said.no-truck'),
+    ...(empty ? [t('ribbon.said.empty', { from: format.when(empty.from), to: format.when(empty.to) })] : []),
+    ...(end ? [t('ribbon.said.end', { when: format.date(end.at), ...sharesOf(end, format) })] : []),
+  ];
+}
+
+/** Each past day's last level, the deliveries, and noon of each day ahead. */
+function usePoints(data: RibbonData, format: Format): { at: number; words: string }[] {
+  const { t } = useTranslation('freezer');
+  const span = spanOf(data);
+  const days = daysOf(span, data);
+  const past = days.flatMap(({ start }, i) => {
+    const end = days[i + 1]?.start ?? span.to;
+    const last = data.history.findLast(([at]) => at >= start && at < end);
+    return last ? [{ at: last[0], words: t('ribbon.points.past', { when: format.date(last[0]), share: format.percent(last[1]) }) }] : [];
+  });
+  const deliveries = data.deliveries
+    .filter(({ at }) => at >= span.from)
+    .map(({ at, pounds }) => {
+      const when = format.when(at);
+      return { at, words: pounds === undefined ? t('ribbon.points.delivery', { when }) : t('ribbon.points.delivery-pounds', { when, pounds: format.pounds(pounds) }) };
+    });
+  const ahead = days.flatMap(({ middle }) => {
+    const point = middle > data.now ? data.forecast.find(({ at }) => at >= middle) : undefined;
+    return point ? [{ at: middle, words: t('ribbon.points.ahead', { when: format.date(middle), ...sharesOf(point, format) }) }] : [];
+  });
+  const highs = days.flatMap(({ middle, high }) =>
+    high === null ? [] : [{ at: middle, words: t('ribbon.points.high', { when: format.date(middle), high: format.degrees(high) }) }],
+  );
+  return [...past, ...deliveries, ...ahead, ...highs].sort((a, b) => a.at - b.at);
+}
+
+const sharesOf = ({ likely, low, high }: ForecastPoint, { percent }: Format) => ({ likely: percent(likely), low: percent(low), high: percent(high) });

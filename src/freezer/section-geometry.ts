@@ -50,7 +50,7 @@ export interface ProbeMark {
   text: string;
 }
 
-export const drawingWidth = 264;
+export const drawingWidth = 260;
 const side = 10;
 const wall = 7;
 const headRoom = 24;

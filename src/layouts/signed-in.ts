@@ -1,5 +1,6 @@
 import { redirect, type LoaderFunctionArgs } from 'react-router-dom';
 import i18next from 'i18next';
+import { signedInMark } from '../../server/contract/auth';
 import { Problem } from '../api/call';
 import { queryClient } from '../api/query';
 import { setLanguage, startLanguage } from '../lib/i18n';
@@ -37,14 +38,20 @@ export async function landAtProducer({ request, params }: LoaderFunctionArgs) {
 export const isSignedOut = (error: unknown): boolean => error instanceof Problem && error.type === 'not-signed-in';
 
 async function whoIsIt(request: Request): Promise<Me> {
+  const known = queryClient.getQueryData<Me>(meQuery.queryKey);
+  if (known) return known;
+  const { pathname, search } = new URL(request.url);
+  if (!markedSignedIn()) throw redirect(paths.signIn(pathname + search));
   try {
-    return queryClient.getQueryData<Me>(meQuery.queryKey) ?? (await firstMeeting());
+    return await firstMeeting();
   } catch (error) {
     if (!isSignedOut(error)) throw error;
-    const { pathname, search } = new URL(request.url);
+    document.cookie = `${signedInMark}=; Max-Age=0; Path=/`;
     throw redirect(paths.signIn(pathname + search));
   }
 }
+
+const markedSignedIn = (): boolean => document.cookie.split('; ').some((cookie) => cookie.startsWith(`${signedInMark}=`));
 
 /** The person's own language wins over what this browser remembered. */
 async function firstMeeting(): Promise<Me> {

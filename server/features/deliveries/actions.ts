@@ -11,7 +11,7 @@ import {
   products,
   type ProducerDb,
 } from '../../db';
-import { dayOf, instantOf } from '../../domain/civil';
+import { dayOf, instantOf, startOfDay } from '../../domain/civil';
 import type { ActionTx, ProducerContext } from '../../http/context';
 import { problem } from '../../http/problem';
 
@@ -64,7 +64,7 @@ export function recordDelivery({ act, now, newId, viewer }: ProducerContext, sto
     knownProducts(tx.db, lines.map(({ productId }) => productId));
     for (const { freezerId } of lines) if (freezerId !== null) freezerOfStore(tx.db, freezerId, store.id);
     const truck = truckOf(tx.db, store.id);
-    const came = truck && dayOf(at, store.timeZone) >= truck.day ? truck : undefined;
+    const came = truck && at >= startOfDay(truck.day, store.timeZone) ? truck : undefined;
     const id = newId();
     tx.db.insert(deliveries, {
       id,

@@ -1,6 +1,6 @@
 import type { Body } from '../../contract/endpoint';
 import type { changeRequest as changeEndpoint, fileRequest as fileEndpoint, RequestSummary } from '../../contract/requests';
-import type { EntryKind, RequestState } from '../../contract/words';
+import type { EntryKind, Language, RequestState } from '../../contract/words';
 import { and, eq, requestEntries, requests } from '../../db';
 import { memberById } from '../../db/views/people';
 import { readableRequests, requestsView } from '../../db/views/requests';
@@ -31,7 +31,7 @@ export function fileRequest(ctx: ProducerContext, { storeId, kind, freezerId, wo
       freezerId,
       kind,
       words,
-      language: store.language,
+      language: languageOf(tx, viewer, store.language),
       state: 'new',
       openedBy: viewer.membershipId,
       openedAt: now,
@@ -45,6 +45,10 @@ export function fileRequest(ctx: ProducerContext, { storeId, kind, freezerId, wo
     return id;
   });
 }
+
+/** The store's own person is answered in their language, anybody else in the store's. */
+const languageOf = (tx: ActionTx, { side, membershipId }: ProducerContext['viewer'], store: Language): Language =>
+  (side === 'store' ? memberById(tx.db, membershipId)?.language : undefined) ?? store;
 
 /** Assigns, moves and schedules; refuses a change that was made looking at an older version. */
 export function changeRequest(ctx: ProducerContext, id: string, change: Body<typeof changeEndpoint>): void {

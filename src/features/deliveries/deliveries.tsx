@@ -58,7 +58,7 @@ function Told({ delivery, zone }: { delivery: Props['listed']['deliveries'][numb
   const { t } = useTranslation('deliveries');
   const say = useStoreWords(zone, delivery.at);
   if (delivery.toldFrom === null || delivery.toldTo === null) return null;
-  return <p className="text-small text-ink-3">{t('told', { window: say.window({ from: delivery.toldFrom, to: delivery.toldTo }) })}</p>;
+  return <p className="text-small text-ink-3">{t('told', { window: say.times({ from: delivery.toldFrom, to: delivery.toldTo }) })}</p>;
 }
 
 function Paging({ next, later }: { next: string | null; later: boolean }) {

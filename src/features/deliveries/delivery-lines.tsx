@@ -11,7 +11,7 @@ interface Props {
 /** One delivery in three short lines: when and how many bags, of which size, and what was taken back from which lot. */
 export function DeliveryLines({ delivery, zone }: Props) {
   const { t } = useTranslation('deliveries');
-  const { number } = useFormat();
+  const { number, pounds } = useFormat();
   const say = useStoreWords(zone, delivery.at);
   const bags = sum(delivery.lines.map((line) => line.bags));
   const back = sum(delivery.lines.map((line) => line.takenBack));
@@ -22,7 +22,7 @@ export function DeliveryLines({ delivery, zone }: Props) {
         <b className="font-bold">{say.when(delivery.at)}</b> · {t('bags', { count: bags, bags: number(bags) })}
       </p>
       <p className="text-small text-ink-2">
-        {byProduct(delivery).map(([product, count]) => t('line', { bags: number(count), product })).join(', ')}
+        {bySize(delivery).map(([size, count]) => t('line', { bags: number(count), size: pounds(size) })).join(', ')}
         {back > 0 && ` · ${t('taken-back', { count: back, bags: number(back) })}`}
       </p>
       {lots.length > 0 && <p className="text-small text-ink-3">{t('lots', { count: lots.length, lots: lots.join(', ') })}</p>}
@@ -32,9 +32,9 @@ export function DeliveryLines({ delivery, zone }: Props) {
 
 const sum = (counts: number[]): number => counts.reduce((total, count) => total + count, 0);
 
-/** Lines into several freezers of one product, added up. */
-function byProduct({ lines }: Delivery): [string, number][] {
-  const totals = new Map<string, number>();
-  for (const { product, bags } of lines) if (bags > 0) totals.set(product, (totals.get(product) ?? 0) + bags);
+/** Lines into several freezers of one bag size, added up. */
+function bySize({ lines }: Delivery): [number, number][] {
+  const totals = new Map<number, number>();
+  for (const { bagPounds, bags } of lines) if (bags > 0) totals.set(bagPounds, (totals.get(bagPounds) ?? 0) + bags);
   return [...totals];
 }

@@ -13,9 +13,9 @@ import { useContractForm } from '../../form/use-contract-form';
 import { useMembership } from '../../lib/me';
 import { PageTitle } from '../../layouts/page-title';
 import { paths } from '../../paths';
+import { Allowed } from '../stores/allowed';
 import { StoreFrame } from '../stores/store-frame';
 import { storeQuery } from '../stores/store-query';
-import { useMust } from '../stores/use-must';
 import { BagsField } from './bags-field';
 import { ClearTruck } from './clear-truck';
 import { productsQuery } from './products-query';
@@ -37,15 +37,16 @@ interface Props {
 /** Dispatch says when the next truck comes, and with what. */
 function SetNextTruck({ found, listed }: Props) {
   const { t } = useTranslation('deliveries');
-  useMust('update', 'NextTruck', { storeId: found.store.id });
   return (
     <StoreFrame store={found.store} narrow>
-      <PageTitle title={t('next-truck.title')} />
-      <h1 className="text-title font-bold">{t('next-truck.title')}</h1>
-      <p className="mt-1 text-ink-2">{t('next-truck.intro')}</p>
-      <p className="text-small text-ink-3">{t('zone', { zone: found.store.timeZone })}</p>
-      <TruckForm found={found} products={listed.products} />
-      {found.nextTruck && <ClearTruck storeId={found.store.id} />}
+      <Allowed to="update" what="NextTruck" where={{ storeId: found.store.id }}>
+        <PageTitle title={t('next-truck.title')} />
+        <h1 className="text-title font-bold">{t('next-truck.title')}</h1>
+        <p className="mt-1 text-ink-2">{t('next-truck.intro')}</p>
+        <p className="text-small text-ink-3">{t('zone', { zone: found.store.timeZone })}</p>
+        <TruckForm found={found} products={listed.products} />
+        {found.nextTruck && <ClearTruck storeId={found.store.id} />}
+      </Allowed>
     </StoreFrame>
   );
 }

@@ -11,9 +11,9 @@ import { useContractForm } from '../../form/use-contract-form';
 import { PageTitle } from '../../layouts/page-title';
 import { useMembership } from '../../lib/me';
 import { paths } from '../../paths';
+import { Allowed } from '../stores/allowed';
 import { StoreFrame } from '../stores/store-frame';
 import { storeQuery } from '../stores/store-query';
-import { useMust } from '../stores/use-must';
 import { DeliveryTime } from './delivery-time';
 import { LineFields } from './line-fields';
 import { productsQuery } from './products-query';
@@ -36,7 +36,6 @@ function RecordDelivery({ found, listed }: Props) {
   const navigate = useNavigate();
   const { slug } = useMembership().producer;
   const storeId = found.store.id;
-  useMust('create', 'Delivery', { storeId });
   const [opened] = useState(Date.now);
   const form = useContractForm(api.deliveries.record, {
     start: { at: opened, lines: linesOf(found, listed.products) },
@@ -49,13 +48,15 @@ function RecordDelivery({ found, listed }: Props) {
   });
   return (
     <StoreFrame store={found.store} narrow>
-      <PageTitle title={t('record.title')} />
-      <h1 className="text-title font-bold">{t('record.title')}</h1>
-      <Form form={form} className="mt-4">
-        <DeliveryTime zone={found.store.timeZone} />
-        <LineFields products={listed.products} freezers={found.freezers} />
-        <SubmitButton>{t('record.save')}</SubmitButton>
-      </Form>
+      <Allowed to="create" what="Delivery" where={{ storeId: found.store.id }}>
+        <PageTitle title={t('record.title')} />
+        <h1 className="text-title font-bold">{t('record.title')}</h1>
+        <Form form={form} className="mt-4">
+          <DeliveryTime zone={found.store.timeZone} />
+          <LineFields products={listed.products} freezers={found.freezers} />
+          <SubmitButton>{t('record.save')}</SubmitButton>
+        </Form>
+      </Allowed>
     </StoreFrame>
   );
 }

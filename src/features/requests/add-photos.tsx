@@ -23,7 +23,7 @@ export function AddPhotos({ request }: { request: Request }) {
   const send = () => act.mutate({ params: { producer: producer.slug, requestId: request.id }, files: asForm(files) }, { onSuccess: () => setFiles([]) });
 
   return (
-    <div className="mt-3">
+    <div className="mt-6">
       {room > 0 && (
         <FileInput
           label={t('photos.add')}

@@ -5,27 +5,9 @@ import type { Request } from '../../../server/contract/requests';
 import { urlOf } from '../../api/call';
 import { useMembership } from '../../lib/me';
 import { Dialog } from '../../ui/dialog';
-import { AddPhotos } from './add-photos';
-
-interface Props {
-  request: Request;
-  mayAdd: boolean;
-}
 
 /** Small ones in a row; each opens larger over the page. */
-export function Photos({ request, mayAdd }: Props) {
-  const { t } = useTranslation('requests');
-  const { photoList } = request;
-  if (photoList.length === 0 && !mayAdd) return null;
-  return (
-    <section className="mt-5" aria-label={t('photos.title')}>
-      {photoList.length > 0 && <Thumbs request={request} />}
-      {mayAdd && <AddPhotos request={request} />}
-    </section>
-  );
-}
-
-function Thumbs({ request }: { request: Request }) {
+export function Photos({ request }: { request: Request }) {
   const { t } = useTranslation(['requests', 'common']);
   const { producer } = useMembership();
   const [shown, show] = useState<number | null>(null);
@@ -33,8 +15,9 @@ function Thumbs({ request }: { request: Request }) {
   const src = (photoId: string) => urlOf(api.requests.readPhoto, { producer: producer.slug, requestId, photoId });
   const name = (i: number) => t('photos.alt', { n: i + 1, count: photoList.length, number: t('number', { number: request.number }) });
   const large = shown === null ? undefined : photoList[shown];
+  if (photoList.length === 0) return null;
   return (
-    <>
+    <section className="mt-5" aria-label={t('photos.title')}>
       <ul className="flex flex-wrap gap-2">
         {photoList.map(({ id }, i) => (
           <li key={id}>
@@ -54,6 +37,6 @@ function Thumbs({ request }: { request: Request }) {
           <img src={src(large.id)} alt={name(shown)} width={large.width} height={large.height} className="max-h-[75dvh] w-full object-contain" />
         )}
       </Dialog>
-    </>
+    </section>
   );
 }

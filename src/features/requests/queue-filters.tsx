@@ -1,4 +1,5 @@
-import type { Ref } from 'react';
+import { useState, type Ref } from 'react';
+import { SlidersHorizontal } from 'lucide-react';
 import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
 import { api } from '../../../server/contract/index';
@@ -19,6 +20,7 @@ interface Props {
 export function QueueFilters({ searchRef }: Props) {
   const { t } = useTranslation('requests');
   const filters = useFilters();
+  const [shown, show] = useState(false);
   const states = stateFilters.map((state) => ({ value: state === 'live' ? '' : state, label: t(stateKey(state)) }));
   const kinds = [{ value: '', label: t('filters.any-kind') }, ...requestKinds.map((kind) => ({ value: kind, label: t(`kinds.${kind}`) }))];
   return (
@@ -30,7 +32,16 @@ export function QueueFilters({ searchRef }: Props) {
         value={filters.get('q')}
         onSearch={(words) => filters.set('q', words)}
       />
-      <div className="grid grid-cols-2 gap-2">
+      <button
+        type="button"
+        aria-expanded={shown}
+        onClick={() => show(!shown)}
+        className="flex min-h-11 items-center gap-2 justify-self-start font-semibold text-fjord lg:hidden"
+      >
+        <SlidersHorizontal aria-hidden size={18} />
+        {t('filters.label')}
+      </button>
+      <div className={`${shown ? 'grid' : 'hidden lg:grid'} grid-cols-2 gap-2`}>
         <FilterSelect label={t('filters.state')} name="state" options={states} filters={filters} />
         <FilterSelect label={t('filters.kind')} name="kind" options={kinds} filters={filters} />
         <AssigneeFilter />

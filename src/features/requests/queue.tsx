@@ -33,8 +33,8 @@ interface Props {
 function Queue({ list }: Props) {
   const { requestId } = useParams();
   const { side } = useMembership();
-  // A store's people come from their store's page and see one request whole.
-  if (requestId && side === 'store') return <Outlet />;
+  // A store's people see one thing at a time: their few requests, or one of them whole.
+  if (side === 'store') return requestId ? <Outlet /> : <ListPane list={list} open={undefined} />;
   return (
     <div className="lg:grid lg:grid-cols-[minmax(300px,340px)_minmax(0,1fr)]">
       <ListPane list={list} open={requestId} />
@@ -49,10 +49,7 @@ function ListPane({ list, open }: Props & { open: string | undefined }) {
   const searchRef = useRef<HTMLInputElement>(null);
   const title = side === 'store' ? t('title-store') : t('title');
   return (
-    <section
-      aria-label={t('list.label')}
-      className={`${open ? 'hidden lg:block' : ''} lg:sticky lg:top-0 lg:h-dvh lg:overflow-y-auto lg:border-r lg:border-rule`}
-    >
+    <section aria-label={t('list.label')} className={side === 'store' ? '-mx-4 max-w-3xl' : `${beside} ${open ? 'hidden lg:block' : ''}`}>
       {!open && <PageTitle title={title} />}
       <h1 className="px-4 pt-5 pb-3 text-title font-bold lg:pt-6">{title}</h1>
       <QueueFilters searchRef={searchRef} />
@@ -64,6 +61,8 @@ function ListPane({ list, open }: Props & { open: string | undefined }) {
     </section>
   );
 }
+
+const beside = 'lg:sticky lg:top-0 lg:h-dvh lg:overflow-y-auto lg:border-r lg:border-rule';
 
 function Rows({ requests, open }: { requests: RequestSummary[]; open: string | undefined }) {
   const { t } = useTranslation('requests');

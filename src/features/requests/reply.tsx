@@ -42,11 +42,15 @@ export function NoteForm({ request }: { request: Request }) {
   const { t } = useTranslation('requests');
   const { producer } = useMembership();
   const [open, setOpen] = useState(false);
+  const [sent, setSent] = useState(false);
   const form = useContractForm(api.requests.note, {
     start: { words: '' },
     input: (body) => ({ params: { producer: producer.slug, requestId: request.id }, body }),
     stale,
-    onDone: () => setOpen(false),
+    onDone: () => {
+      setOpen(false);
+      setSent(true);
+    },
   });
   if (!open) {
     return (
@@ -54,6 +58,9 @@ export function NoteForm({ request }: { request: Request }) {
         <Button variant="quiet" onClick={() => setOpen(true)}>
           {t('note.label')}
         </Button>
+        <p role="status" className="mt-2 text-ink-2 empty:hidden">
+          {sent && t('note.sent')}
+        </p>
       </div>
     );
   }

@@ -11,6 +11,7 @@ import { q } from '../../api/query';
 import { PageTitle } from '../../layouts/page-title';
 import { useAbility, useMembership } from '../../lib/me';
 import { paths } from '../../paths';
+import { AddPhotos } from './add-photos';
 import { Cancel } from './cancel';
 import { Change } from './change';
 import { Facts } from './facts';
@@ -46,10 +47,11 @@ function RequestView({ request }: { request: Request }) {
       <div className="min-w-0 px-4 py-5 sm:px-7 lg:py-6">
         <Back request={request} />
         <RequestHead request={request} />
-        <Photos request={request} mayAdd={may.addPhotos} />
+        <Photos request={request} />
         <Story request={request} fresh={fresh} />
         {may.reply && <ReplyForm request={request} />}
         {may.note && <NoteForm request={request} />}
+        {may.addPhotos && <AddPhotos request={request} />}
         {may.cancel && <Cancel request={request} />}
       </div>
       <aside className="border-t border-rule bg-paper px-4 py-5 sm:px-6 xl:border-t-0 xl:border-l">

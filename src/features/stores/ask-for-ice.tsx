@@ -4,12 +4,12 @@ import type { StorePage } from '../../../server/contract/stores';
 import { truckToCome } from '../../../server/domain/answers';
 import { page, type Place } from '../../api/page';
 import { PageTitle } from '../../layouts/page-title';
+import { Allowed } from './allowed';
 import { FiledReport } from './filed-report';
 import { RequestForm } from './request-form';
 import { StoreFrame } from './store-frame';
 import { knownOf } from './store-known';
 import { storeQuery } from './store-query';
-import { useMust } from './use-must';
 import { useNow } from './use-now';
 import { useStoreWords } from './use-store-words';
 
@@ -24,26 +24,27 @@ interface Props {
 function AskForIce({ found, place }: Props) {
   const { t } = useTranslation('report');
   const navigate = useNavigate();
-  useMust('create', 'Request', { storeId: found.store.id, kind: 'ice-sooner' });
   const filed = place.search.get('filed');
   return (
     <StoreFrame store={found.store} narrow>
-      <PageTitle title={t('sooner.title')} />
-      <h1 className="text-title font-bold">{t('sooner.title')}</h1>
-      {filed ? (
-        <FiledReport requestId={filed} store={found.store} kind="sooner" />
-      ) : (
-        <>
-          <Planned found={found} />
-          <RequestForm
-            start={{ storeId: found.store.id, kind: 'ice-sooner', freezerId: null }}
-            label={t('sooner.words')}
-            hint={t('sooner.words-hint')}
-            send={t('sooner.send')}
-            onFiled={(requestId) => void navigate(`?filed=${requestId}`, { replace: true })}
-          />
-        </>
-      )}
+      <Allowed to="create" what="Request" where={{ storeId: found.store.id, kind: 'ice-sooner' }}>
+        <PageTitle title={t('sooner.title')} />
+        <h1 className="text-title font-bold">{t('sooner.title')}</h1>
+        {filed ? (
+          <FiledReport requestId={filed} store={found.store} kind="sooner" />
+        ) : (
+          <>
+            <Planned found={found} />
+            <RequestForm
+              start={{ storeId: found.store.id, kind: 'ice-sooner', freezerId: null }}
+              label={t('sooner.words')}
+              hint={t('sooner.words-hint')}
+              send={t('sooner.send')}
+              onFiled={(requestId) => void navigate(`?filed=${requestId}`, { replace: true })}
+            />
+          </>
+        )}
+      </Allowed>
     </StoreFrame>
   );
 }

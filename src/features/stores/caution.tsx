@@ -1,7 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import { useMembership } from '../../lib/me';
 import { Notice } from '../../ui/notice';
-import { phoneLink } from './phone-link';
+import { phoneLink, phoneText } from './phone-link';
 import type { ProblemKind } from './report-steps';
 
 /** Where somebody could be hurt, or sold bad ice. */
@@ -18,7 +18,7 @@ export function Caution({ kind }: { kind: ProblemKind }) {
       <p>{t(`cautions.${danger}`)}</p>
       {urgentPhone && (
         <a href={phoneLink(urgentPhone)} className="inline-flex min-h-12 items-center font-semibold text-fjord underline underline-offset-4">
-          {t('urgent', { phone: urgentPhone })}
+          {t('urgent', { phone: phoneText(urgentPhone) })}
         </a>
       )}
     </Notice>

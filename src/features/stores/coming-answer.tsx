@@ -33,7 +33,7 @@ export function ComingAnswer({ answer, zone, now }: Telling & { answer: Told }) 
 function useHeadline({ value, said }: Told, zone: string, now: number): string {
   const { t } = useTranslation('store');
   const say = useStoreWords(zone, now);
-  if (value) return say.window(value);
+  if (value) return say.headline(value);
   if (said.key === 'delivered') return say.time(said.at);
   return t(said.key === 'missed' ? 'answers.coming.missed' : 'answers.coming.none');
 }

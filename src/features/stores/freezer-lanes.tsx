@@ -28,7 +28,7 @@ export function FreezerLanes({ freezer, state }: Props) {
               <span className={`block h-full rounded-full ${low ? hatched : 'bg-fjord-2'}`} style={{ width: `${share * 100}%` }} />
             </span>
             <span className="text-right">
-              {low && <span className="mr-1.5 font-semibold text-ember">{t('freezer.low')}</span>}
+              {low && <span className="mr-1.5 font-semibold text-ember">{t(bags === 0 ? 'freezer.empty' : 'freezer.low')}</span>}
               {t(about ? 'freezer.bags-about' : 'freezer.bags', { count: bags, bags: format.number(bags) })}
             </span>
           </li>

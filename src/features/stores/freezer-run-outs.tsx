@@ -9,11 +9,11 @@ interface Props {
   now: number;
 }
 
-/** When each side is empty without a truck, never finer than a part of the day. */
+/** When each side that still has bags is empty without a truck, never finer than a part of the day. */
 export function FreezerRunOuts({ freezer, state, zone, now }: Props) {
   const { t } = useTranslation('store');
   const say = useStoreWords(zone, now);
-  const dated = state.laneRunOuts.flatMap(({ likely, late }, i) => (likely === null || likely <= now ? [] : [{ likely, late, lane: freezer.lanes[i] }]));
+  const dated = state.laneRunOuts.flatMap(({ likely, late }, i) => (likely === null || likely <= now || state.level.lanes[i]?.bags === 0 ? [] : [{ likely, late, lane: freezer.lanes[i] }]));
   if (dated.length === 0) return null;
   return (
     <ul className="mt-3 grid gap-1 text-ink-2">

@@ -4,6 +4,7 @@ import type { StorePage } from '../../../server/contract/stores';
 import { page, type Place } from '../../api/page';
 import { useTyped } from '../../form/typed';
 import { PageTitle } from '../../layouts/page-title';
+import { Allowed } from './allowed';
 import { FiledReport } from './filed-report';
 import { usePhotos } from './photos';
 import { ReportDetails } from './report-details';
@@ -12,7 +13,6 @@ import { ReportKind } from './report-kind';
 import { reportStep, withAnswers, type ReportStep } from './report-steps';
 import { StoreFrame } from './store-frame';
 import { storeQuery } from './store-query';
-import { useMust } from './use-must';
 import { usePhotoSending } from './use-photo-sending';
 
 export const reportPage = page({ queries: (place) => ({ found: storeQuery(place) }), View: Report });
@@ -25,13 +25,14 @@ interface Props {
 /** Three taps: what, where, send. The answers stand in the address; the photos stay here while the steps change. */
 function Report({ found, place }: Props) {
   const { t } = useTranslation('report');
-  useMust('create', 'Request', { storeId: found.store.id, kind: 'other' });
   const step = reportStep(place.search, found.freezers.map(({ id }) => id));
   return (
     <StoreFrame store={found.store} narrow>
-      <PageTitle title={t('title')} />
-      <h1 className="text-title font-bold">{t('title')}</h1>
-      <Steps step={step} found={found} place={place} />
+      <Allowed to="create" what="Request" where={{ storeId: found.store.id, kind: 'other' }}>
+        <PageTitle title={t('title')} />
+        <h1 className="text-title font-bold">{t('title')}</h1>
+        <Steps step={step} found={found} place={place} />
+      </Allowed>
     </StoreFrame>
   );
 }

@@ -41,6 +41,8 @@ export function storeWords(t: TFunction<'store'>, format: Format, now: number) {
     /** For a mark on a drawing: "Thu". */
     shortDay: (at: number) => format.weekday(at, 'short'),
     ago: (at: number) => format.ago(at, now),
+    /** "Today 2:20–3:50", "Thu 9:40–11:10". */
+    headline: (window: Window & { day: string }) => (window.day === today ? t('when.window-today', { window: format.times(window) }) : format.window(window)),
     dayAndWindow: (window: Window & { day: string }) => t('when.window', { day: weekday(window.day), window: format.times(window) }),
     weekdays: (days: number[]) => format.list(days.filter(isWeekday).map((day) => format.weekdayName(day))),
   };

@@ -2,7 +2,7 @@ import { Phone } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import type { Answers } from '../../../server/domain/answers';
 import { useMembership } from '../../lib/me';
-import { phoneLink } from './phone-link';
+import { phoneLink, phoneText } from './phone-link';
 
 /** The producer's urgent phone, only where something cannot wait for a form. */
 export function UrgentPhone({ answers }: { answers: Answers }) {
@@ -15,7 +15,7 @@ export function UrgentPhone({ answers }: { answers: Answers }) {
       className="mt-3 flex min-h-12 items-center gap-2.5 rounded-card border border-rust bg-rust-tint px-5 py-2.5 font-semibold text-rust"
     >
       <Phone aria-hidden size={20} className="shrink-0" />
-      {t('freezer.urgent', { producer: name, phone: urgentPhone })}
+      {t('freezer.urgent', { producer: name, phone: phoneText(urgentPhone) })}
     </a>
   );
 }
