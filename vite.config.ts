@@ -6,6 +6,7 @@ const api = `http://127.0.0.1:${process.env.PORT ?? '4040'}`;
 
 export default defineConfig({
   plugins: [react(), tailwindcss()],
+  publicDir: 'src/public',
   build: {
     outDir: 'dist/client',
     emptyOutDir: true,

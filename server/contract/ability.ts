@@ -111,6 +111,8 @@ function technician(can: Can, viewer: Viewer) {
   can('read', 'Store', { id: { $in: viewer.storeIds } });
   can('read', ['Freezer', 'Event'], visits);
   can(['read', 'update', 'reply'], 'Request', mine);
+  // What they filed themselves they can look after until somebody has it.
+  can('read', 'Request', { openedBy: viewer.membershipId });
   can('create', 'Request', visits);
   can(['read', 'create'], 'Note', mine);
   can(['read', 'create', 'update'], ['Install', 'Sensor', 'Model']);

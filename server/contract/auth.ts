@@ -3,9 +3,6 @@ import { email, id, instant, language, slug, words } from './common';
 import { endpoint } from './endpoint';
 import { grants, roles, sides } from './words';
 
-/** A cookie pages may read: somebody is signed in here, so it is worth asking who. It proves nothing. */
-export const signedInMark = 'nilas.in';
-
 /** A path of this application; anything else falls back to the front page. */
 export const nextPath = z.string().check(z.maxLength(500));
 
@@ -60,15 +57,27 @@ export const membership = z.object({
 });
 export type Membership = z.output<typeof membership>;
 
+const whole = z.object({
+  person: z.object({ id, name: z.string(), email: z.string(), language }),
+  memberships: z.array(membership),
+});
+
 export const me = endpoint({
   id: 'me.read',
   method: 'get',
   path: '/api/me',
   access: { kind: 'person' },
-  result: z.object({
-    person: z.object({ id, name: z.string(), email: z.string(), language }),
-    memberships: z.array(membership),
-  }),
+  result: whole,
+  problems: [],
+});
+
+/** Who is signed in here, or nobody: what a page asks first, without a complaint in the console where nobody is. */
+export const readSession = endpoint({
+  id: 'auth.readSession',
+  method: 'get',
+  path: '/api/auth/session',
+  access: { kind: 'public', reason: 'tells a browser about its own cookie' },
+  result: z.object({ me: z.nullable(whole) }),
   problems: [],
 });
 

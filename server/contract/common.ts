@@ -8,7 +8,7 @@ export const id = z.uuid(fault('id'));
 export const slug = z.string().check(z.regex(/^[a-z][a-z0-9-]{1,38}[a-z0-9]$/));
 export const language = z.enum(languages, fault('choice'));
 /** Milliseconds since 1970-01-01 UTC. */
-export const instant = z.int(fault('number'));
+export const instant = z.int(fault('number')).check(z.minimum(0, fault('number')), z.maximum(8.64e15, fault('number')));
 /** A local calendar day. */
 export const day = z.iso.date(fault('day'));
 export const timeOfDay = z.string().check(z.regex(/^([01]\d|2[0-3]):[0-5]\d$/, fault('time')));

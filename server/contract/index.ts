@@ -9,7 +9,7 @@ import type { Endpoint } from './endpoint';
 
 /** The list that the server mounts, the client calls, OpenAPI describes and the tests enumerate. */
 export const api = {
-  auth: { requestLink: auth.requestLink, signIn: auth.signIn, signOut: auth.signOut },
+  auth: { requestLink: auth.requestLink, signIn: auth.signIn, readSession: auth.readSession, signOut: auth.signOut },
   me: { read: auth.me, update: auth.updateMe, sessions: auth.mySessions, endSession: auth.endSession },
   telemetry: { ingest: telemetry.ingest },
   stores: { list: stores.listStores, read: stores.readStore },

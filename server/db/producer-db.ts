@@ -1,4 +1,4 @@
-import { and, eq, type SQL } from 'drizzle-orm';
+import { and, eq, sql, type SQL } from 'drizzle-orm';
 import { getTableConfig, type SelectedFields, type SQLiteColumn, type SQLiteTable } from 'drizzle-orm/sqlite-core';
 import type { Database } from './open';
 import { unownedTables } from './statement-hook';
@@ -23,7 +23,7 @@ export function producerDb(db: Database, producerId: string) {
 
     find: <T extends OwnedTable>(table: T, id: string, visible?: SQL): T['$inferSelect'] | undefined =>
       // Drizzle widens the row of a generic table; it is the table's own row.
-      db.select().from(table as OwnedTable).where(and(own(table), eq(table.id, id), visible)).get() as T['$inferSelect'] | undefined,
+      db.select().from(table as OwnedTable).where(and(own(table), eq(table.id, id), inside(visible))).get() as T['$inferSelect'] | undefined,
 
     insert: <T extends OwnedTable>(table: T, values: Inserted<T>): void => {
       db.insert(table as OwnedTable).values({ ...values, producerId }).run();
@@ -32,19 +32,19 @@ export function producerDb(db: Database, producerId: string) {
     upsert: <T extends OwnedTable>(table: T, values: Inserted<T>, set: Patched<T>): void => {
       db.insert(table as OwnedTable)
         .values({ ...values, producerId })
-        .onConflictDoUpdate({ target: [table.producerId, table.id], set: set as Record<string, unknown>, setWhere: own(table) })
+        .onConflictDoUpdate({ target: [table.producerId, table.id], set: { ...set, producerId } as Record<string, unknown>, setWhere: own(table) })
         .run();
     },
 
     /** How many rows changed. */
     update: <T extends OwnedTable>(table: T, id: string, patch: Patched<T>, where?: SQL): number =>
       db.update(table as OwnedTable)
-        .set(patch as Record<string, unknown>)
-        .where(and(own(table), eq(table.id, id), where))
+        .set({ ...patch, producerId } as Record<string, unknown>)
+        .where(and(own(table), eq(table.id, id), inside(where)))
         .run().changes,
 
     delete: <T extends OwnedTable>(table: T, where: SQL): number =>
-      db.delete(table).where(and(own(table), where)).run().changes,
+      db.delete(table).where(and(own(table), inside(where))).run().changes,
 
     /** Hand-written SQL of `views/`: it is given the producer to bind, and the statement hook refuses a table without it. */
     view: <Row>(build: (producer: string) => SQL): Row[] => db.all<Row>(build(producerId)),
@@ -59,15 +59,18 @@ interface Select {
   innerJoin: (table: SQLiteTable, on: SQL) => unknown;
 }
 
+/** Drizzle joins conditions as they are written, so an `or` of the caller's would reach past the producer. */
+const inside = (condition: SQL | undefined): SQL | undefined => condition && sql`(${condition})`;
+
 /** Keeps Drizzle's own types: the instance's `where` and joins are replaced by ones that add the predicate. */
 function scoped<Q>(query: Q, predicate: SQL, own: (table: OwnedTable) => SQL): Q {
   const target = query as Q & Select;
   const where = target.where.bind(target);
   where(predicate);
-  target.where = (condition) => where(and(predicate, condition));
+  target.where = (condition) => where(and(predicate, inside(condition)));
   for (const join of ['leftJoin', 'innerJoin'] as const) {
     const plain = target[join].bind(target);
-    target[join] = (table, on) => plain(table, isOwned(table) ? (and(own(table), on) as SQL) : on);
+    target[join] = (table, on) => plain(table, isOwned(table) ? (and(own(table), inside(on)) as SQL) : on);
   }
   for (const join of ['rightJoin', 'fullJoin', 'crossJoin']) {
     Object.assign(target, { [join]: () => { throw new Error(`${join} cannot be scoped`); } });

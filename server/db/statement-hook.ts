@@ -20,9 +20,18 @@ export const ownedTables: ReadonlySet<string> = new Set(
     .filter((name) => !(name in unownedTables)),
 );
 
-const NAMED = /\b(?:from|join|into|update)\s+(?:or\s+\w+\s+)?"?(\w+)"?/gi;
-const SCOPE = /\bproducer_id"?\s*(?:=|in\b)/gi;
+/** A table after from, join, into or update: quoted or not, with its schema or not, and after a comma in a list of them. */
+const NAME = '(?:\\w+\\s*\\.\\s*)?["`[]?(\\w+)["`\\]]?';
+const NAMED = new RegExp(`\\b(?:from|join|into|update)\\s*\\(*\\s*(?:or\\s+\\w+\\s+)?${NAME}`, 'g');
+const LISTED = new RegExp(`\\bfrom\\s+${NAME}(?:\\s+(?:as\\s+)?\\w+)?\\s*,\\s*${NAME}`, 'g');
+/** The producer bound to a value or to another table's producer; not to itself, and not in what an update sets. */
+const SCOPE = /((?:["`[]?\w+["`\]]?\s*\.\s*)?["`[]?producer_id["`\]]?)\s*(?:=\s*(\?|[@:$]\w+|(?:["`[]?\w+["`\]]?\s*\.\s*)?["`[]?producer_id["`\]]?)|in\s*\()/g;
+const INSERT = /\binto\s+["`[]?\w+["`\]]?\s*\([^)]*\bproducer_id\b/g;
 const LITERAL = /'(?:[^']|'')*'/g;
+const COMMENT = /--[^\n]*|\/\*[\s\S]*?\*\//g;
+const SET = /\bset\b[\s\S]*?(?=\bwhere\b|\breturning\b|$)/g;
+/** `… or 1` and the like beside a scope would undo it; a caller's conditions come in brackets. */
+const UNDONE = /\bproducer_id["`\]]?\s*=\s*(?:\?|[@:$]\w+)\s+or\b/;
 const seen = new Set<string>();
 let across = 0;
 
@@ -52,10 +61,16 @@ export function watchStatements(connection: SQLite.Database): void {
 
 /** The first producer's table that the statement names without a scope, or null. */
 export function unscoped(source: string): string | null {
-  const sql = source.replace(LITERAL, "''");
-  const named = [...sql.matchAll(NAMED)].map((match) => match[1] ?? '').filter((name) => ownedTables.has(name));
+  const sql = source.replace(LITERAL, "''").replace(COMMENT, ' ').toLowerCase();
+  const named = [...matches(sql, NAMED, 1), ...matches(sql, LISTED, 2)].filter((name) => ownedTables.has(name));
   if (named.length === 0) return null;
-  const inserts = /\binto\s+"?\w+"?\s*\([^)]*\bproducer_id\b/gi;
-  const scopes = (sql.match(SCOPE)?.length ?? 0) + (sql.match(inserts)?.length ?? 0);
-  return scopes >= named.length ? null : (named[scopes] ?? named[0] ?? null);
+  const first = named[0] ?? null;
+  if (UNDONE.test(sql)) return first;
+  const isUpdate = /^\s*update\b/.test(sql);
+  const asked = isUpdate ? sql.replace(SET, ' ') : sql.replace(/\bdo update set\b[\s\S]*?(?=\bwhere\b|\breturning\b|$)/g, ' ');
+  const bound = [...asked.matchAll(SCOPE)].filter(([, left, right]) => left !== right).length;
+  const scopes = bound + (sql.match(INSERT)?.length ?? 0);
+  return scopes >= named.length ? null : (named[scopes] ?? first);
 }
+
+const matches = (sql: string, pattern: RegExp, group: number): string[] => [...sql.matchAll(pattern)].map((match) => match[group] ?? '');

@@ -1,17 +1,16 @@
-import { writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { readConfig } from '../config';
 import { roles } from '../contract/words';
 import { demoPeople } from '../features/dev/demo-people';
 import type { Services } from '../http/context';
 import { start, stopOnSignal } from '../start';
+import { signInUrl, writeDemoFile } from './demo-file';
 import { catchUp, play } from './play';
 import { openWorld, type Played } from './world';
 
 /** `npm run demo`: the portal with the invented world in it, which goes on living unless `--no-play` is given. */
 const running = await start(readConfig('demo', process.env), path.resolve(import.meta.dirname, '../..'));
 const { services } = running;
-const url = services.config.baseUrl;
 const local = `http://${services.config.host}:${running.port}`;
 
 const began = Date.now();
@@ -22,28 +21,15 @@ print(services, played, Date.now() - began);
 if (!process.argv.includes('--no-play')) play(running, local, played);
 stopOnSignal(running);
 
-function writeDemoFile({ db, config }: Services, worlds: Played[]): void {
-  const people = demoPeople(db).map(({ role, email, language, slug }) => ({ role, email, language, producer: slug, signInUrl: signInUrl(email) }));
-  const telemetry = worlds.map(({ demo, key, fleet }) => ({
-    producer: demo.slug,
-    key,
-    sensors: fleet.map(({ id, serial, simulated }) => ({ urn: serial, freezerId: id, probes: simulated.setup.mount.probesIn.length })),
-  }));
-  writeFileSync(path.join(config.dataDir, 'demo.json'), `${JSON.stringify({ url, people, telemetry }, null, 2)}\n`, { mode: 0o600 });
-}
-
-function signInUrl(email: string): string {
-  return `${url}/dev/people?email=${encodeURIComponent(email)}`;
-}
-
-function print({ db }: Services, worlds: Played[], ms: number): void {
+function print({ db, config }: Services, worlds: Played[], ms: number): void {
+  const url = config.baseUrl;
   const people = demoPeople(db);
   console.log(`\nNilas is up at ${url}  (world ready in ${(ms / 1000).toFixed(1)} s; mail at ${url}/dev/mail, everybody at ${url}/dev/people)\n`);
   for (const { demo } of worlds) {
     console.log(demo.name);
     for (const role of roles) {
       const person = people.find((one) => one.role === role && one.slug === demo.slug);
-      if (person) console.log(`  ${role.padEnd(15)} ${person.name.padEnd(18)} ${signInUrl(person.email)}`);
+      if (person) console.log(`  ${role.padEnd(15)} ${person.name.padEnd(18)} ${signInUrl(url, person.email)}`);
     }
   }
 }

@@ -25,31 +25,27 @@ export const noTroubles: Troubles = { madeAt: 0, broken: {}, silent: {}, short: 
 
 /**
  * A dead compressor, a sensor silent since yesterday, a 20 lb lane nobody fills, a truck that is late, one that came
- * this morning, and a store that runs out before its next. What trucks of before are still to do, they do.
+ * this morning, and a store that runs out before its next. Trucks staged before that are still to come do come.
  */
 export function troublesAt(now: number, demo: DemoProducer, fleet: { serial: string; store: DemoStore }[], before: Troubles): Troubles {
   const { broken, silent, short, late, morning, hungry } = demo.troubles;
-  const storeNamed = (name: string): DemoStore => {
-    const found = fleet.find(({ store }) => store.name === name)?.store;
-    if (!found) throw new Error(`the demo names ${name}, which has no sensor`);
-    return found;
+  const firstOf = (name: string) => fleet.find(({ store }) => store.name === name);
+  // A store may have been renamed or lost its sensor since the demo was made.
+  const sensor = (name: string, since: number): Record<string, number> => {
+    const one = firstOf(name);
+    return one ? { [one.serial]: since } : {};
   };
-  const first = (name: string): string => {
-    const store = storeNamed(name);
-    return fleet.find((one) => one.store === store)?.serial ?? '';
+  const truck = (name: string, stage: (store: DemoStore, now: number) => Staged): Record<string, Staged> => {
+    const one = firstOf(name);
+    return one ? { [one.store.id]: stage(one.store, now) } : {};
   };
   const ahead = Object.entries(before.staged).filter(([, { trucks }]) => (trucks.at(-1)?.at ?? 0) > now);
   return {
     madeAt: now,
-    broken: { [first(broken)]: now - 4.5 * HOUR },
-    silent: { [first(silent)]: now - 26 * HOUR },
-    short: { [first(short)]: now - 12 * DAY },
-    staged: {
-      [storeNamed(late).id]: lateTruck(storeNamed(late), now),
-      [storeNamed(morning).id]: morningTruck(storeNamed(morning), now),
-      [storeNamed(hungry).id]: fewTrucks(storeNamed(hungry), now),
-      ...Object.fromEntries(ahead),
-    },
+    broken: sensor(broken, now - 4.5 * HOUR),
+    silent: sensor(silent, now - 26 * HOUR),
+    short: sensor(short, now - 12 * DAY),
+    staged: { ...truck(late, lateTruck), ...truck(morning, morningTruck), ...truck(hungry, fewTrucks), ...Object.fromEntries(ahead) },
   };
 }
 
@@ -70,14 +66,14 @@ function morningTruck({ timeZone }: DemoStore, now: number): Staged {
   return { from: midnight, trucks: [{ day, from, to: from + 90 * MINUTE, at }] };
 }
 
-/** The last came days ago, the next comes the day after tomorrow. */
+/** The last came days ago, the next comes in three days. */
 function fewTrucks({ timeZone }: DemoStore, now: number): Staged {
   const on = (days: number): Truck => {
     const day = addDays(dayOf(now, timeZone), days);
     const from = instantOf(day, '09:10', timeZone);
     return { day, from, to: from + 90 * MINUTE, at: from + 45 * MINUTE };
   };
-  return { from: instantOf(addDays(dayOf(now, timeZone), -4), '00:00', timeZone), trucks: [on(-4), on(2)] };
+  return { from: instantOf(addDays(dayOf(now, timeZone), -4), '00:00', timeZone), trucks: [on(-4), on(3)] };
 }
 
 const floored = (at: number): number => Math.floor(at / (10 * MINUTE)) * 10 * MINUTE;

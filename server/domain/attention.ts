@@ -6,18 +6,17 @@ export interface FreezerGlance {
   at: number | null;
   share: number | null;
   warmSince: number | null;
+  /** Of its first lane; not after `at` where a lane holds no whole bag. */
   runOutLikely: number | null;
 }
 
 export type Attention = 'warm' | 'empty' | 'runs-out-first' | 'truck-late' | 'silent' | 'none';
 
-const EMPTY_BELOW = 0.02;
-
 /** The worst thing about a store, for whoever decides where to look first. */
 export function attentionOf(freezers: FreezerGlance[], truck: { from: number; to: number } | null, now: number): Attention {
   const believed = freezers.filter(({ at }) => at !== null && freshnessOf(at, now) !== 'unusable');
   if (believed.some(({ warmSince }) => warmSince !== null)) return 'warm';
-  if (believed.some(({ share }) => share !== null && share < EMPTY_BELOW)) return 'empty';
+  if (believed.some(({ at, runOutLikely }) => at !== null && runOutLikely !== null && runOutLikely <= at)) return 'empty';
   if (truck && now > truck.to) return 'truck-late';
   if (believed.some(({ runOutLikely }) => runOutLikely !== null && (truck ? runOutLikely < truck.from : runOutLikely < now + 2 * DAY))) {
     return 'runs-out-first';

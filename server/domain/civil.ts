@@ -20,12 +20,27 @@ function formatOf(timeZone: string): Intl.DateTimeFormat {
   return made;
 }
 
+/** Clocks change at whole quarters of an hour only, so an offset holds for its quarter. Asking Intl costs some 10 µs. */
+const QUARTER_MS = HOUR_MS / 4;
+const MOST_KNOWN = 4096;
+const offsets = new Map<string, Map<number, number>>();
+
 /** How far local time is ahead of UTC at an instant. */
 function offsetAt(instant: number, timeZone: string): number {
+  const known = offsets.get(timeZone) ?? new Map<number, number>();
+  if (known.size === 0) offsets.set(timeZone, known);
+  if (known.size >= MOST_KNOWN) known.clear();
+  const quarter = Math.floor(instant / QUARTER_MS);
+  const offset = known.get(quarter) ?? offsetFromIntl(quarter * QUARTER_MS, timeZone);
+  known.set(quarter, offset);
+  return offset;
+}
+
+function offsetFromIntl(instant: number, timeZone: string): number {
   const parts: Record<string, number> = {};
   for (const { type, value } of formatOf(timeZone).formatToParts(instant)) parts[type] = Number(value);
   const { year = 0, month = 1, day = 1, hour = 0, minute = 0, second = 0 } = parts;
-  return Date.UTC(year, month - 1, day, hour, minute, second) - Math.floor(instant / 1000) * 1000;
+  return Date.UTC(year, month - 1, day, hour, minute, second) - instant;
 }
 
 /** The local calendar day of an instant. */

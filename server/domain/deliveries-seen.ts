@@ -1,3 +1,5 @@
+import type { LaneReader, Rise, Told } from './lane-reader';
+
 /** A lasting upward step: the first reading that shows it, and the measured pounds by lane. */
 export interface DeliverySeen {
   at: number;
@@ -8,37 +10,35 @@ export interface DeliverySeen {
 const LEAST_POUNDS = 25;
 /** Rises this near each other are one truck's. */
 const ONE_VISIT_MS = 2 * 3_600_000;
-/** Readings on either side that say whether a rise lasts. */
+/** The first reading of a rise and the ones after it, which say whether it lasts. */
 const LOOK = 3;
 
 /**
- * Finds deliveries in the lanes' pounds over time. `pounds[i]` are the lanes at `at[i]`; `sdPounds` is one sd of a
- * lane's level from its stack alone. A rise counts beyond max(25 lb, 3 sd of a difference) and must last.
- * Answers the deliveries and the index of the first reading after each rise.
+ * Finds deliveries in the lanes' pounds over time: a rise of any lane beyond max(25 lb, 3 sd of it) that lasts through
+ * the next readings, as far as there are any. Answers the deliveries and the index of the first reading of each rise.
  */
-export function deliveriesSeen(at: number[], pounds: number[][], sdPounds: number[]): { seen: DeliverySeen[]; starts: number[] } {
+export function deliveriesSeen(told: Told[], reader: LaneReader): { seen: DeliverySeen[]; starts: number[] } {
   const seen: DeliverySeen[] = [];
   const starts: number[] = [];
-  for (let i = 1; i < at.length; i += 1) {
-    const rises = sdPounds.map((_, lane) => rise(pounds, lane, i));
-    const real = rises.some((pound, lane) => pound > threshold(sdPounds[lane] ?? 0) && lasting(pounds, lane, i) > threshold(sdPounds[lane] ?? 0));
-    if (!real) continue;
+  told.forEach((now, i) => {
+    const before = told[i - 1];
+    const rise = before && reader.rise(before, now);
+    if (!rise || !rise.pounds.some((_, lane) => isBig(rise, lane) && lasts(told, i, reader, lane))) return;
     starts.push(i);
-    const now = at[i] ?? 0;
+    const brought = rise.pounds.map((pounds) => Math.max(0, pounds));
     const last = seen.at(-1);
-    if (last && now - last.at <= ONE_VISIT_MS) last.pounds = last.pounds.map((pound, lane) => pound + Math.max(0, rises[lane] ?? 0));
-    else seen.push({ at: now, pounds: rises.map((pound) => Math.max(0, pound)) });
-  }
+    if (last && now.at - last.at <= ONE_VISIT_MS) last.pounds = last.pounds.map((pounds, lane) => pounds + (brought[lane] ?? 0));
+    else seen.push({ at: now.at, pounds: brought });
+  });
   return { seen, starts };
 }
 
-const threshold = (sd: number): number => Math.max(LEAST_POUNDS, 3 * Math.SQRT2 * sd);
+const isBig = ({ pounds, sdPounds }: Rise, lane: number): boolean => (pounds[lane] ?? 0) > Math.max(LEAST_POUNDS, 3 * (sdPounds[lane] ?? 0));
 
-const rise = (pounds: number[][], lane: number, i: number): number => (pounds[i]?.[lane] ?? 0) - (pounds[i - 1]?.[lane] ?? 0);
-
-/** The lowest of the readings after it above the highest just before it. */
-function lasting(pounds: number[][], lane: number, i: number): number {
-  const before = pounds.slice(Math.max(0, i - 1), i).map((lanes) => lanes[lane] ?? 0);
-  const after = pounds.slice(i, i + LOOK).map((lanes) => lanes[lane] ?? 0);
-  return Math.min(...after) - Math.max(...before);
+function lasts(told: Told[], i: number, reader: LaneReader, lane: number): boolean {
+  const before = told[i - 1];
+  return told.slice(i + 1, i + LOOK).every((after) => {
+    const rise = before ? reader.rise(before, after) : null;
+    return rise === null || isBig(rise, lane);
+  });
 }

@@ -1,7 +1,8 @@
 import { midnights } from './civil';
 import { coolingOf } from './cooling';
 import { deliveriesSeen, type DeliverySeen } from './deliveries-seen';
-import { laneViews, levelOf, poundsReader, PRIOR_K_SD, priorPoundsPerInch, setupFaults, stackSdIn } from './level';
+import { laneReader, type LaneReader, type Told } from './lane-reader';
+import { levelOf, possibleDistance, PRIOR_K_SD, probeStacks, setupFaults } from './level';
 import { firstLane, plainRunOut } from './run-out';
 import { dailyRate, salesBetween, salesByDay, type DailyRate } from './sales';
 import { cleanDistances, orderedReadings } from './signal';
@@ -50,24 +51,19 @@ export interface FoldInput {
  */
 export function foldState({ setup, timeZone, readings, kSdShare = PRIOR_K_SD }: FoldInput): FreezerState | null {
   if (setupFaults(setup).length > 0) return null;
-  const ordered = orderedReadings(readings);
-  const distances = cleanDistances(ordered, setup.mount.probesIn.length);
-  const read = poundsReader(setup);
-  const told = ordered.flatMap(({ at }, i) => {
-    const distancesIn = distances[i] ?? [];
-    const pounds = read(distancesIn);
-    return pounds ? [{ at, pounds, distancesIn }] : [];
-  });
+  const ordered = orderedReadings(readings, (distanceIn) => possibleDistance(setup, distanceIn));
+  const reader = laneReader(setup);
+  const told = tellings(setup, ordered, reader);
   const last = told.at(-1);
   const level = last && levelOf(setup, last.distancesIn, kSdShare);
   if (!last || !level) return null;
 
-  const at = told.map((one) => one.at);
-  const pounds = told.map((one) => one.pounds);
-  const sd = stackSdPounds(setup, last.distancesIn);
-  const { seen, starts } = deliveriesSeen(at, pounds, sd);
-  const rates = setup.lanes.map(({ bagPounds }, lane) => rateOf(at, pounds.map((lanes) => lanes[lane] ?? 0), starts, timeZone, bagPounds));
-  const laneRunOuts = setup.lanes.map((_, i) => plainRunOut(last.pounds[i] ?? 0, sd[i] ?? 0, rates[i] ?? NO_RATE, last.at));
+  const { seen, starts } = deliveriesSeen(told, reader);
+  const rates = ratesOf(setup, told, starts, timeZone);
+  const { sdPounds } = reader.read(last.stacks);
+  // Less than a bag is nothing to sell.
+  const left = level.lanes.map(({ bags, pounds }) => (bags === 0 ? 0 : pounds));
+  const laneRunOuts = setup.lanes.map((_, i) => plainRunOut(left[i] ?? 0, sdPounds[i] ?? 0, rates[i] ?? NO_RATE, last.at));
   const lane = firstLane(laneRunOuts);
   return {
     at: last.at,
@@ -79,41 +75,52 @@ export function foldState({ setup, timeZone, readings, kSdShare = PRIOR_K_SD }: 
     laneRunOuts,
     rates,
     deliveries: seen,
-    history: historyOf(at, pounds.map((lanes) => total(lanes) / level.capacityPounds), starts),
+    history: historyOf(told, level.capacityPounds, starts),
   };
 }
 
 const NO_RATE: DailyRate = { poundsPerDay: 0, sdPounds: 0, days: 0 };
 const NEVER: RunOut = { early: null, likely: null, late: null };
 
-/** One sd of each lane's pounds from its stack alone. */
-function stackSdPounds(setup: FreezerSetup, distancesIn: (number | null)[]): number[] {
-  const views = laneViews(setup, setup.mount.probesIn.map((_, i) => typeof distancesIn[i] === 'number'));
-  return setup.lanes.map((lane, i) => priorPoundsPerInch(setup, lane) * stackSdIn(setup, lane, views[i] ?? { weights: [], borrowed: true }));
+/** The readings in which any probe spoke, spikes out and short gaps of single probes filled. */
+function tellings(setup: FreezerSetup, ordered: Reading[], reader: LaneReader): Told[] {
+  const { probesIn } = setup.mount;
+  const spoken = ordered.filter(({ distancesIn }) => probesIn.some((_, probe) => typeof distancesIn[probe] === 'number'));
+  const distances = cleanDistances(spoken, probesIn.length);
+  return spoken.flatMap(({ at }, i) => {
+    const distancesIn = distances[i] ?? [];
+    const stacks = probeStacks(setup, distancesIn);
+    if (stacks.every((stack) => stack === null)) return [];
+    const { live, pounds } = reader.read(stacks);
+    return [{ at, distancesIn, stacks, live, pounds }];
+  });
 }
 
-function rateOf(at: number[], pounds: number[], starts: number[], timeZone: string, bagPounds: number): DailyRate {
+/** Each lane's rate from its last whole days. Across a change of live probes nothing is counted as sold. */
+function ratesOf({ lanes }: FreezerSetup, told: Told[], deliveries: number[], timeZone: string): DailyRate[] {
+  const at = told.map((one) => one.at);
   const first = at[0] ?? 0;
   const last = at.at(-1) ?? 0;
-  const starting = midnights(first, last, timeZone);
-  const days = salesByDay(at, salesBetween(pounds, starts), starting);
-  const whole = days.filter((_, day) => {
-    const from = starting[day] ?? 0;
-    const to = starting[day + 1] ?? 0;
-    return first <= from + WHOLE_DAY_SLACK_MS && last >= to - WHOLE_DAY_SLACK_MS;
+  const starting = midnights(Math.max(first, last - (RATE_DAYS + 2) * DAY_MS), last, timeZone);
+  const whole = starting.slice(1).map((to, day) => first <= (starting[day] ?? 0) + WHOLE_DAY_SLACK_MS && last >= to - WHOLE_DAY_SLACK_MS);
+  const delivered = new Set(deliveries);
+  const breaks = told.flatMap(({ live }, i) => (i > 0 && (delivered.has(i) || live !== told[i - 1]?.live) ? [i] : []));
+  return lanes.map(({ bagPounds }, lane) => {
+    const sales = salesBetween(told.map(({ pounds }) => pounds[lane] ?? 0), breaks);
+    const days = salesByDay(at, sales, starting).filter((_, day) => whole[day]);
+    return dailyRate(days.slice(-RATE_DAYS), bagPounds);
   });
-  return dailyRate(whole.slice(-RATE_DAYS), bagPounds);
 }
 
 /** The last reading of each hour, and both sides of every delivery's step. */
-function historyOf(at: number[], shares: number[], starts: number[]): [number, number][] {
-  const last = at.at(-1) ?? 0;
+function historyOf(told: Told[], capacityPounds: number, starts: number[]): [number, number][] {
+  const last = told.at(-1)?.at ?? 0;
   const steps = new Set(starts.flatMap((i) => [i - 1, i]));
-  return at.flatMap((instant, i): [number, number][] => {
-    const next = at[i + 1];
-    const closesHour = next === undefined || Math.floor(next / HOUR_MS) !== Math.floor(instant / HOUR_MS);
-    const shown = instant > last - HISTORY_MS && (closesHour || steps.has(i));
-    return shown ? [[instant, Math.round((shares[i] ?? 0) * 10_000) / 10_000]] : [];
+  return told.flatMap(({ at, pounds }, i): [number, number][] => {
+    const next = told[i + 1];
+    const closesHour = !next || Math.floor(next.at / HOUR_MS) !== Math.floor(at / HOUR_MS);
+    const shown = at > last - HISTORY_MS && (closesHour || steps.has(i));
+    return shown ? [[at, Math.round((total(pounds) / capacityPounds) * 10_000) / 10_000]] : [];
   });
 }
 

@@ -1,16 +1,17 @@
-import type { FreezerSetup, Lane, LaneLevel, Level, Mount } from './types';
+import { laneViews, UNSEEN, type LaneView } from './lane-views';
+import type { FreezerSetup, Lane, LaneLevel, Level } from './types';
 import { BULK_POUNDS_PER_CUBIC_INCH, ICE_POUNDS_PER_CUBIC_INCH } from './units';
 
-/** A probe this near a boundary (in) sees the higher of two lanes and tells little of either. */
-const NEAR_BOUNDARY_IN = 2.5;
 /** Beyond the floor by up to this much (in) is an empty column; further is impossible. */
 const FLOOR_TOLERANCE_IN = 2;
+/** Three thirds written with three digits miss one by a thousandth. */
+const SHARES_TOLERANCE = 0.002;
 /** One sd of a probe's own noise (in). Common practice, no published source. */
 export const PROBE_NOISE_IN = 0.3;
 /** A bag lies flat: its thickness over the edge of a cube of the same volume. Common practice, no published source. */
 const FLATNESS = 0.5;
-/** One sd of a borrowed stack, as a share of a full one. */
-const BORROWED_SD = 0.25;
+/** One sd more where a lane is not seen by a probe of its own, as a share of a full stack. Chosen, no published source. */
+const UNSEEN_SD: Record<LaneView['seen'], number> = { own: 0, boundary: 0.12, borrowed: 0.25 };
 /** One sd of pounds per inch before any calibration. */
 export const PRIOR_K_SD = 0.2;
 
@@ -19,12 +20,13 @@ export type SetupFault = 'no-lanes' | 'shares' | 'no-stack' | 'no-probes' | 'pro
 /** What makes a freezer's level meaningless; empty when nothing does. */
 export function setupFaults({ model, mount, lanes }: FreezerSetup): SetupFault[] {
   const sizes = [model.insideWidthIn, model.insideDepthIn, model.insideHeightIn, model.ratedPounds];
+  const drops = [mount.channelDropIn, mount.rackIn, mount.headroomIn];
   const sum = lanes.reduce((total, { widthShare }) => total + widthShare, 0);
   const faults: [SetupFault, boolean][] = [
-    ['model', sizes.some((size) => !(size > 0 && Number.isFinite(size)))],
+    ['model', sizes.some((size) => !(size > 0 && size < Infinity))],
     ['no-lanes', lanes.length === 0],
-    ['shares', Math.abs(sum - 1) > 0.001 || lanes.some(({ widthShare, bagPounds }) => !(widthShare > 0 && bagPounds > 0))],
-    ['no-stack', !(usableStackIn({ model, mount }) > 0)],
+    ['shares', Math.abs(sum - 1) > SHARES_TOLERANCE || lanes.some(({ widthShare, bagPounds }) => !(widthShare > 0 && bagPounds > 0 && bagPounds < Infinity))],
+    ['no-stack', !(usableStackIn({ model, mount }) > 0) || drops.some((drop) => !(drop >= 0))],
     ['no-probes', mount.probesIn.length === 0],
     ['probe-outside', mount.probesIn.some((x) => !(x >= 0 && x <= model.insideWidthIn))],
   ];
@@ -37,15 +39,19 @@ export const usableStackIn = ({ model, mount }: Pick<FreezerSetup, 'model' | 'mo
 
 /** Height of the bags under each probe (in), 0 to a full stack; null where the distance is missing or impossible. */
 export function probeStacks(setup: Pick<FreezerSetup, 'model' | 'mount'>, distancesIn: (number | null)[]): (number | null)[] {
-  const { model, mount } = setup;
-  const floor = model.insideHeightIn - mount.channelDropIn - mount.rackIn;
   const full = usableStackIn(setup);
-  return mount.probesIn.map((_, i) => {
-    const distance = distancesIn[i] ?? null;
-    if (distance === null || !(distance >= 0 && distance <= floor + FLOOR_TOLERANCE_IN)) return null;
-    return Math.min(full, Math.max(0, floor - distance));
+  return setup.mount.probesIn.map((_, i) => {
+    const distance = possibleDistance(setup, distancesIn[i] ?? null);
+    return distance === null ? null : Math.min(full, Math.max(0, floorIn(setup) - distance));
   });
 }
+
+/** The distance (in), or null where it is negative or more than two inches beyond the floor. */
+export const possibleDistance = (setup: Pick<FreezerSetup, 'model' | 'mount'>, distanceIn: number | null): number | null =>
+  distanceIn !== null && distanceIn >= 0 && distanceIn <= floorIn(setup) + FLOOR_TOLERANCE_IN ? distanceIn : null;
+
+/** From a probe's face down to the rack (in). */
+const floorIn = ({ model, mount }: Pick<FreezerSetup, 'model' | 'mount'>): number => model.insideHeightIn - mount.channelDropIn - mount.rackIn;
 
 /** Pounds in an inch of a lane's stack before calibration: rated pounds by share of the width over a full stack. */
 export const priorPoundsPerInch = (setup: FreezerSetup, lane: Lane): number =>
@@ -60,7 +66,7 @@ export function levelOf(setup: FreezerSetup, distancesIn: (number | null)[], kSd
   const stacks = probeStacks(setup, distancesIn);
   if (stacks.every((stack) => stack === null)) return null;
   const views = laneViews(setup, stacks.map((stack) => stack !== null));
-  const lanes = setup.lanes.map((lane, i) => laneLevel(setup, lane, views[i] ?? NO_VIEW, stacks, kSdShare));
+  const lanes = setup.lanes.map((lane, i) => laneLevel(setup, lane, views[i] ?? UNSEEN, stacks, kSdShare));
   const pounds = sum(lanes.map((lane) => lane.pounds));
   const capacity = sum(lanes.map((lane) => lane.capacityPounds));
   // Stacks err each by itself; pounds per inch err together, since the rated pounds are one number.
@@ -68,110 +74,43 @@ export function levelOf(setup: FreezerSetup, distancesIn: (number | null)[], kSd
   return { pounds, sdPounds: Math.hypot(stackSd, kSdShare * pounds), capacityPounds: capacity, share: capacity > 0 ? pounds / capacity : 0, lanes };
 }
 
-/**
- * Reads pounds by lane from many sets of distances of one sound setup; null where no probe tells anything. The same
- * numbers as `levelOf`, without what only the latest needs.
- */
-export function poundsReader(setup: FreezerSetup): (distancesIn: (number | null)[]) => number[] | null {
-  const views = new Map<string, LaneView[]>();
-  const poundsPerInch = setup.lanes.map((lane) => priorPoundsPerInch(setup, lane));
-  return (distancesIn) => {
-    const stacks = probeStacks(setup, distancesIn);
-    const live = stacks.map((stack) => stack !== null);
-    if (!live.includes(true)) return null;
-    const key = live.join();
-    const known = views.get(key) ?? laneViews(setup, live);
-    views.set(key, known);
-    return setup.lanes.map((lane, i) => withinVolume(setup, lane, poundsPerInch[i] ?? 0, stackOf(known[i] ?? NO_VIEW, stacks)));
-  };
-}
-
-const stackOf = ({ weights }: LaneView, stacks: (number | null)[]): number => sum(weights.map(([i, weight]) => weight * (stacks[i] ?? 0)));
-
-/** Which probes a lane is read from, with weights that sum to one. */
-export interface LaneView {
-  weights: [probe: number, weight: number][];
-  borrowed: boolean;
-}
-const NO_VIEW: LaneView = { weights: [], borrowed: true };
-
-/**
- * For each lane its own live probes, weighted by how much of its width lies nearest each; one near a boundary only
- * where the lane has no better; a lane without any borrows the nearest.
- */
-export function laneViews({ model, mount, lanes }: FreezerSetup, live: boolean[]): LaneView[] {
-  const width = model.insideWidthIn;
-  let left = 0;
-  return lanes.map(({ widthShare }) => {
-    const span = { from: left, to: left + widthShare * width };
-    left = span.to;
-    const own = indices(mount, (x, i) => live[i] === true && x >= span.from && x <= span.to);
-    const clear = own.filter((i) => distanceToBoundary(mount.probesIn[i] ?? 0, span, width) > NEAR_BOUNDARY_IN);
-    if (clear.length > 0) return { weights: cells(clear, mount, span), borrowed: false };
-    const near = indices(mount, (x, i) => live[i] === true && x >= span.from - NEAR_BOUNDARY_IN && x <= span.to + NEAR_BOUNDARY_IN);
-    if (near.length > 0) return { weights: near.map((i) => [i, 1 / near.length]), borrowed: false };
-    const nearest = closest(indices(mount, (_, i) => live[i] === true), mount, (span.from + span.to) / 2);
-    return nearest === null ? NO_VIEW : { weights: [[nearest, 1]], borrowed: true };
-  });
-}
-
-interface Span {
-  from: number;
-  to: number;
-}
-
-const indices = ({ probesIn }: Mount, wanted: (x: number, i: number) => boolean): number[] =>
-  probesIn.flatMap((x, i) => (wanted(x, i) ? [i] : []));
-
-/** To the nearest boundary between lanes; the freezer's own walls are none. */
-const distanceToBoundary = (x: number, { from, to }: Span, width: number): number =>
-  Math.min(from > 0 ? x - from : Infinity, to < width - 1e-6 ? to - x : Infinity);
-
-function cells(probes: number[], { probesIn }: Mount, { from, to }: Span): [number, number][] {
-  const at = probes.map((i) => ({ i, x: probesIn[i] ?? 0 })).sort((a, b) => a.x - b.x);
-  return at.map(({ i, x }, n) => {
-    const before = at[n - 1];
-    const after = at[n + 1];
-    const start = before ? (before.x + x) / 2 : from;
-    const end = after ? (after.x + x) / 2 : to;
-    return [i, (end - start) / (to - from)];
-  });
-}
-
-const closest = (probes: number[], { probesIn }: Mount, x: number): number | null =>
-  probes.reduce<number | null>((best, i) => (best === null || gap(probesIn, i, x) < gap(probesIn, best, x) ? i : best), null);
-const gap = (probesIn: number[], i: number, x: number): number => Math.abs((probesIn[i] ?? 0) - x);
-
 /** One sd of a lane's stack (in): probe noise and half a bag's thickness per column, over the columns seen. */
-export function stackSdIn(setup: FreezerSetup, lane: Lane, { weights, borrowed }: LaneView): number {
+export function stackSdIn(setup: FreezerSetup, lane: Lane, { weights, seen }: LaneView): number {
   const thickness = FLATNESS * Math.cbrt(lane.bagPounds / BULK_POUNDS_PER_CUBIC_INCH);
   const column = Math.hypot(PROBE_NOISE_IN, thickness / 2 / Math.sqrt(3));
-  const seen = column * Math.hypot(...weights.map(([, weight]) => weight));
-  return borrowed ? Math.hypot(seen, BORROWED_SD * usableStackIn(setup)) : seen;
+  const columns = column * Math.hypot(...weights.map(([, weight]) => weight));
+  return Math.hypot(columns, UNSEEN_SD[seen] * usableStackIn(setup));
 }
 
 function laneLevel(setup: FreezerSetup, lane: Lane, view: LaneView, stacks: (number | null)[], kSdShare: number): LaneLevel {
   const stackIn = stackOf(view, stacks);
-  const k = priorPoundsPerInch(setup, lane);
-  const pounds = withinVolume(setup, lane, k, stackIn);
-  const sdPounds = Math.hypot(k * stackSdIn(setup, lane, view), kSdShare * pounds);
+  const pounds = lanePounds(setup, lane, stackIn);
+  const sdPounds = Math.hypot(stackSdPounds(setup, lane, view), kSdShare * pounds);
   return {
     productId: lane.productId,
     pounds,
     sdPounds,
-    capacityPounds: withinVolume(setup, lane, k, usableStackIn(setup)),
+    capacityPounds: lanePounds(setup, lane, usableStackIn(setup)),
     // Whole bags; the guard keeps 59.999999999 from losing one.
     bags: Math.floor(pounds / lane.bagPounds + 1e-6),
     about: sdPounds > lane.bagPounds,
     stackIn,
-    borrowed: view.borrowed,
+    borrowed: view.seen === 'borrowed',
   };
 }
 
-/** Never more than solid ice of that height would weigh. */
-function withinVolume({ model }: FreezerSetup, lane: Lane, k: number, stackIn: number): number {
-  const volume = model.insideWidthIn * lane.widthShare * model.insideDepthIn * stackIn;
-  return Math.min(k * stackIn, volume * ICE_POUNDS_PER_CUBIC_INCH);
+/** Pounds of a lane's stack (in): never more than solid ice of that height would weigh. */
+export function lanePounds(setup: FreezerSetup, lane: Lane, stackIn: number): number {
+  const { insideWidthIn, insideDepthIn } = setup.model;
+  const volume = insideWidthIn * lane.widthShare * insideDepthIn * stackIn;
+  return Math.min(priorPoundsPerInch(setup, lane) * stackIn, volume * ICE_POUNDS_PER_CUBIC_INCH);
 }
+
+/** One sd of a lane's pounds from its stack alone. */
+export const stackSdPounds = (setup: FreezerSetup, lane: Lane, view: LaneView): number => priorPoundsPerInch(setup, lane) * stackSdIn(setup, lane, view);
+
+/** A lane's stack (in) as its probes tell it. */
+export const stackOf = ({ weights }: LaneView, stacks: (number | null)[]): number =>
+  weights.reduce((total, [probe, weight]) => total + weight * (stacks[probe] ?? 0), 0);
 
 const sum = (values: number[]): number => values.reduce((total, value) => total + value, 0);

@@ -6,8 +6,9 @@ const ANCHOR_PART = 1 / 8;
 
 /**
  * Pounds sold from each reading to the next, for one lane: the falls of the non-increasing fit between deliveries.
- * `starts` are the indices of the first reading after each delivery. The fit's ends are biased outward by noise, so
- * they are held within the medians of the first and last readings. Length is that of `pounds`; the first is 0.
+ * `starts` are the indices of the first reading after each delivery, or after a change of eyes. The fit's ends are
+ * biased outward by noise, so they are held within the medians of the first and last readings; a segment that ends no
+ * lower than it began sold nothing. Length is that of `pounds`; the first is 0.
  */
 export function salesBetween(pounds: number[], starts: number[]): number[] {
   const sales = Array<number>(pounds.length).fill(0);
@@ -15,17 +16,20 @@ export function salesBetween(pounds: number[], starts: number[]): number[] {
   for (let n = 0; n + 1 < bounds.length; n += 1) {
     const from = bounds[n] ?? 0;
     const segment = pounds.slice(from, bounds[n + 1]);
-    const fit = anchored(segment);
-    for (let i = 1; i < fit.length; i += 1) sales[from + i] = Math.max(0, (fit[i - 1] ?? 0) - (fit[i] ?? 0));
+    anchoredFalls(segment).forEach((fall, i) => (sales[from + i] = fall));
   }
   return sales;
 }
 
-function anchored(segment: number[]): number[] {
+function anchoredFalls(segment: number[]): number[] {
   const count = Math.max(1, Math.min(ANCHOR, Math.floor(segment.length * ANCHOR_PART)));
   const high = median(segment.slice(0, count));
   const low = median(segment.slice(-count));
-  return isotonicNonIncreasing(segment).map((value) => Math.min(Math.max(high, low), Math.max(Math.min(high, low), value)));
+  if (low >= high) return segment.map(() => 0);
+  const fit = isotonicNonIncreasing(segment).map((value) => Math.min(high, Math.max(low, value)));
+  // A median stands in the middle of its readings: what sells before the first and after the last is added in proportion.
+  const stretch = (segment.length - 1) / (segment.length - count);
+  return fit.map((value, i) => ((fit[i - 1] ?? value) - value) * stretch);
 }
 
 /** A lane's rate from its whole local days: pounds a day, one sd from day to day, and how many days that is. */

@@ -1,17 +1,26 @@
 import type { Reading } from './types';
 
+/** An instant outside the years 1970 to 9998 is no reading's. */
+const END_OF_TIME = Date.UTC(9999, 0, 1);
+
 /**
  * The readings of one freezer in order of time, each moment once. Two words about one moment merge by the cautious
- * value (larger distance, warmer air, weaker supply), so the result depends on the set of readings alone.
+ * value (larger distance, warmer air, weaker supply), so the result depends on the set of readings alone. What is no
+ * number, and a distance that `possible` refuses, is as if the sensor had said nothing.
  */
-export function orderedReadings(readings: Reading[]): Reading[] {
+export function orderedReadings(readings: Reading[], possible: (distanceIn: number | null) => number | null = (distanceIn) => distanceIn): Reading[] {
   const byTime = new Map<number, Reading>();
-  for (const reading of readings) {
-    const known = byTime.get(reading.at);
-    byTime.set(reading.at, known ? merged(known, reading) : reading);
+  for (const raw of readings) {
+    if (!(raw.at >= 0 && raw.at < END_OF_TIME)) continue;
+    const distancesIn = raw.distancesIn.map((distance) => possible(numberIn(distance)));
+    const reading = { at: raw.at, distancesIn, airF: numberIn(raw.airF), supplyV: numberIn(raw.supplyV) };
+    const known = byTime.get(raw.at);
+    byTime.set(raw.at, known ? merged(known, reading) : reading);
   }
   return [...byTime.values()].sort((a, b) => a.at - b.at);
 }
+
+const numberIn = (value: number | null): number | null => (value !== null && Number.isFinite(value) ? value : null);
 
 function merged(a: Reading, b: Reading): Reading {
   const length = Math.max(a.distancesIn.length, b.distancesIn.length);
@@ -38,35 +47,45 @@ const CARRY_READINGS = 6;
 
 /**
  * Distances by reading and probe with spikes out and short gaps carried over; null where a probe is dead.
- * Hampel's rule per probe over three readings on either side. At the young end, where less is known, a jump that
- * several probes make together is believed at once, and one that a lone probe makes waits for a second reading.
+ * Hampel's rule per probe over three readings on either side. At the young end, where fewer are known, a jump that
+ * several probes make together is believed at once; a lone probe's waits for a second reading that says the same.
  */
 export function cleanDistances(readings: Reading[], probes: number): (number | null)[][] {
   const raw = Array.from({ length: probes }, (_, p) => readings.map(({ distancesIn }) => distancesIn[p] ?? null));
   const odd = raw.map((series) => series.map((_, i) => oddness(series, i)));
-  const clean = raw.map((series, p) =>
-    series.map((value, i) => {
+  const young = readings.length - HALF_WINDOW;
+  const carried = raw.map((series, p) => {
+    const believed = (value: number | null, i: number) => {
       const sign = odd[p]?.[i] ?? 0;
-      if (sign === 0) return value;
-      const settled = series.length - 1 - i >= HALF_WINDOW;
-      const together = odd.filter((signs) => signs[i] === sign).length > 1;
-      return !settled && together ? value : null;
-    }),
-  );
-  const carried = clean.map(carryOver);
+      return sign === 0 || (i >= young && (odd.filter((signs) => signs[i] === sign).length > 1 || isConfirmed(series, i, value)));
+    };
+    return carryOver(series.map((value, i) => (believed(value, i) ? value : null)));
+  });
   return readings.map((_, i) => carried.map((series) => series[i] ?? null));
+}
+
+/** The next word of the probe says the same. */
+function isConfirmed(series: (number | null)[], i: number, value: number | null): boolean {
+  const next = series.slice(i + 1).find((one) => one !== null);
+  return value !== null && next !== undefined && next !== null && Math.abs(next - value) <= LEAST_SPIKE_IN;
 }
 
 /** 1 or -1 where a value stands out from its neighbours above or below, else 0. */
 function oddness(series: (number | null)[], i: number): -1 | 0 | 1 {
   const value = series[i];
   if (value === null || value === undefined) return 0;
-  const around = series.slice(Math.max(0, i - HALF_WINDOW), i + HALF_WINDOW + 1).filter((one) => one !== null);
-  if (around.length < 3) return 0;
+  const around: number[] = [];
+  for (let j = Math.max(0, i - HALF_WINDOW); j <= i + HALF_WINDOW && j < series.length; j += 1) {
+    const one = series[j];
+    if (one !== null && one !== undefined) around.push(one);
+  }
+  // Most of the time nothing moves, and sorting is what this costs.
+  if (around.length < 3 || Math.max(...around) - Math.min(...around) <= LEAST_SPIKE_IN) return 0;
   const middle = median(around);
-  const spread = MAD_TO_SD * median(around.map((one) => Math.abs(one - middle)));
   const off = value - middle;
-  if (Math.abs(off) <= Math.max(LEAST_SPIKE_IN, HAMPEL_SD * spread)) return 0;
+  if (Math.abs(off) <= LEAST_SPIKE_IN) return 0;
+  const spread = MAD_TO_SD * median(around.map((one) => Math.abs(one - middle)));
+  if (Math.abs(off) <= HAMPEL_SD * spread) return 0;
   return off > 0 ? 1 : -1;
 }
 

@@ -3,7 +3,6 @@ import type { Request, RequestHandler } from 'express';
 import session, { Store, type SessionData } from 'express-session';
 import { eq, lt, sessions, type Database } from '../db';
 import type { Config } from '../config';
-import { signedInMark } from '../contract/auth';
 import type { Services } from './context';
 import { problem } from './problem';
 
@@ -110,8 +109,6 @@ export const sessionMiddleware = (config: Config, db: Database, now: () => numbe
 
 /** Gives the browser a new session of this person; the old id is gone. */
 export function startSession(services: Services, req: Request, personId: string): Promise<void> {
-  const secure = services.config.baseUrl.startsWith('https:');
-  req.res?.cookie(signedInMark, '1', { sameSite: 'lax', secure, maxAge: sessionLimits.store.absolute, path: '/' });
   const staff = services.system.membershipsOf(personId).some(({ membership }) => membership.side === 'producer');
   return new Promise((resolve, reject) => {
     req.session.regenerate((error) => {
@@ -128,18 +125,26 @@ export function startSession(services: Services, req: Request, personId: string)
   });
 }
 
-export function endOwnSession(req: Request): Promise<void> {
-  req.res?.clearCookie(signedInMark, { path: '/' });
-  return new Promise((resolve, reject) => {
+export const endOwnSession = (req: Request): Promise<void> =>
+  new Promise((resolve, reject) => {
     req.session.destroy((error) => (error ? reject(error instanceof Error ? error : new Error(String(error))) : resolve()));
   });
-}
 
 /** Who is asking; somebody deactivated is nobody from the next request on. */
-export function signedIn({ system }: Services, req: Request): { personId: string; handle: string } {
+export function signedIn(services: Services, req: Request): SignedIn {
+  const found = whoIs(services, req);
+  if (!found) throw problem('not-signed-in');
+  return found;
+}
+
+interface SignedIn {
+  personId: string;
+  handle: string;
+}
+
+export function whoIs({ system }: Services, req: Request): SignedIn | null {
   const { personId, handle } = req.session;
-  if (!personId || !handle || !system.activePerson(personId)) throw problem('not-signed-in');
-  return { personId, handle };
+  return personId && handle && system.activePerson(personId) ? { personId, handle } : null;
 }
 
 /** Before a large body is taken in. */

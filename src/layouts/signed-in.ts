@@ -1,7 +1,7 @@
 import { redirect, type LoaderFunctionArgs } from 'react-router-dom';
 import i18next from 'i18next';
-import { signedInMark } from '../../server/contract/auth';
-import { Problem } from '../api/call';
+import { api } from '../../server/contract/index';
+import { call, Problem } from '../api/call';
 import { queryClient } from '../api/query';
 import { setLanguage, startLanguage } from '../lib/i18n';
 import { membershipAt, meQuery, rememberProducer, type Me } from '../lib/me';
@@ -38,24 +38,17 @@ export async function landAtProducer({ request, params }: LoaderFunctionArgs) {
 export const isSignedOut = (error: unknown): boolean => error instanceof Problem && error.type === 'not-signed-in';
 
 async function whoIsIt(request: Request): Promise<Me> {
-  const known = queryClient.getQueryData<Me>(meQuery.queryKey);
-  if (known) return known;
+  const me = queryClient.getQueryData<Me>(meQuery.queryKey) ?? (await firstMeeting());
+  if (me) return me;
   const { pathname, search } = new URL(request.url);
-  if (!markedSignedIn()) throw redirect(paths.signIn(pathname + search));
-  try {
-    return await firstMeeting();
-  } catch (error) {
-    if (!isSignedOut(error)) throw error;
-    document.cookie = `${signedInMark}=; Max-Age=0; Path=/`;
-    throw redirect(paths.signIn(pathname + search));
-  }
+  throw redirect(paths.signIn(pathname + search));
 }
 
-const markedSignedIn = (): boolean => document.cookie.split('; ').some((cookie) => cookie.startsWith(`${signedInMark}=`));
-
 /** The person's own language wins over what this browser remembered. */
-async function firstMeeting(): Promise<Me> {
-  const me = await queryClient.ensureQueryData(meQuery);
+async function firstMeeting(): Promise<Me | null> {
+  const { me } = await call(api.auth.readSession, {});
+  if (!me) return null;
+  queryClient.setQueryData(meQuery.queryKey, me);
   await startLanguage();
   if (me.person.language !== i18next.language) await setLanguage(me.person.language);
   return me;

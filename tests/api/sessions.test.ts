@@ -154,6 +154,14 @@ describe('own sessions', () => {
   });
 });
 
+test('a page that asks who is here is told, or told nobody', async () => {
+  const asked = async (who: Agent): Promise<unknown> => (await who.get('/api/auth/session').expect(200)).body.me;
+  const marta = browserOf(server, alderPeople.manager);
+  expect(await asked(browser(server))).toBeNull();
+  expect(await asked(browserOf(server, alderPeople.gone))).toBeNull();
+  expect(await asked(marta)).toEqual((await marta.get('/api/me').expect(200)).body);
+});
+
 describe('me', () => {
   test('tells of every producer a person works with', async () => {
     const { body } = await browserOf(server, alderPeople.both).get('/api/me').expect(200);

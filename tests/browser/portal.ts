@@ -3,11 +3,12 @@ import { createRequire } from 'node:module';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { chromium, type Browser, type BrowserContext, type Page } from 'playwright-core';
+import sharp from 'sharp';
 import { expect } from 'vitest';
 import { readConfig } from '../../server/config';
 import { start, type Running } from '../../server/start';
 import { alder, alderPeople, birch, birchPeople } from '../cast';
-import { morning, plantProducer } from '../factories';
+import { morning, photoFiles, plantProducer } from '../factories';
 import { chromiumFlags, findChromium } from '../support/chromium.mjs';
 import { freePort } from '../support/server-process';
 
@@ -45,6 +46,8 @@ export async function openPortal(): Promise<Portal> {
   const running = await start(config, root, () => morning + (Date.now() - opened));
   plantProducer(running.services.db, birch, birchPeople, 101);
   plantProducer(running.services.db, alder, alderPeople, 1);
+  const picture = await sharp({ create: { width: 8, height: 8, channels: 3, background: '#88aabb' } }).jpeg().toBuffer();
+  for (const file of photoFiles(alder)) await running.services.storage.put(file, picture);
   const executablePath = findChromium();
   if (!executablePath) throw new Error('no Chromium: run the tests by `npm test`, which finds or installs it');
   const browser = await chromium.launch({ executablePath, args: chromiumFlags });

@@ -116,6 +116,8 @@ export const cases: Case[] = [
   { endpoint: api.me.sessions, status: 200 },
   { endpoint: api.me.endSession, path: { handle: { own: 'nobodys-handle' } }, status: 404 },
   { endpoint: api.auth.signOut, status: 204 },
+  { endpoint: api.auth.readSession, status: 200 },
+  { endpoint: api.auth.readSession, status: 200 },
   { endpoint: api.auth.requestLink, body: () => ({ email: alderPeople.manager.email }), status: 202 },
   { endpoint: api.auth.signIn, body: () => ({ token: 'guessed' }), status: 410 },
   { endpoint: api.system.health, status: 200 },

@@ -4,7 +4,7 @@ export const forgotten: [what: string, calls: RegExp, statement: RegExp, column:
   ['its join of districts', /^stores\.list/, /as "openRequests"/, '"district"."producer_id"'],
   ['its join of accounts', /^stores\.list/, /as "openRequests"/, '"account"."producer_id"'],
   ['its join of trucks', /^stores\.list/, /as "openRequests"/, '"next_truck"."producer_id"'],
-  ['its count of requests', /^stores\.list/, /as "openRequests"/, 'r.producer_id'],
+  ['its count of requests', /^stores\.list/, /as "openRequests"/, '"request"."producer_id"'],
   ['its freezers', /^stores\.list/, /as "openRequests"/, 'f.producer_id'],
   ['its states', /^stores\.list/, /as "openRequests"/, 'st.producer_id'],
   ['a store', /^stores\.read/, /^select .*"postal_code".* from "store"/, '"store"."producer_id"'],

@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
-import { alderMembers } from '../cast';
-import { testApp, type TestApp } from '../support/server';
+import { alder, alderMembers, alderPeople } from '../cast';
+import { browserOf, testApp, type TestApp } from '../support/server';
 import { cases, ingestWithKey, uncovered } from './cases';
 import { outsiders, surveyMember, surveyOutsider, watchWrites } from './survey';
 
@@ -37,6 +37,16 @@ describe.each(outsiders)('as %s', (who, email, signedIn) => {
     for (const one of cases) found.push(...(await surveyOutsider(server, one, who, email, signedIn)));
     expect(found).toEqual([]);
   });
+});
+
+test('somebody of both producers is at each what they are there', async () => {
+  const found: string[] = [];
+  for (const one of cases.filter(({ endpoint }) => endpoint.access.kind === 'may')) found.push(...(await surveyMember(server, one, 'agent', alderPeople.both.email)));
+  expect(found).toEqual([]);
+  const atBirch = await browserOf(server, alderPeople.both).get('/api/birch-ice/stores').expect(200);
+  expect(atBirch.body.stores).toHaveLength(1);
+  expect(atBirch.text).not.toContain(alder.mark);
+  await browserOf(server, alderPeople.both).get('/api/birch-ice/assignees').expect(403);
 });
 
 test('a telemetry key speaks for its own producer only', async () => {

@@ -12,6 +12,7 @@ const requestColumns = {
   storeId: requests.storeId,
   assigneeId: requests.assigneeId,
   kind: requests.kind,
+  openedBy: requests.openedBy,
 };
 export const readableRequests = (ability: Ability): SQL => allowed(ability, 'read', 'Request', requestColumns);
 
@@ -56,7 +57,7 @@ export function recentRequestsOfStore(db: ProducerDb, ability: Ability, storeId:
 }
 
 /** One request with its timeline; notes to staff only where `notes` says so. */
-export function requestView(db: ProducerDb, where: SQL, notes: (request: RequestSummary) => boolean): Request | undefined {
+export function requestView(db: ProducerDb, where: SQL, notes: (request: RequestSummary & Pick<Request, 'openedBy'>) => boolean): Request | undefined {
   const [request] = requestsView(db, where, 1);
   if (!request) return undefined;
   const entries = db.view<Record<string, unknown> & { kind: string; author: string | null; assignee: string | null }>(

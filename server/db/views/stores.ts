@@ -22,15 +22,19 @@ export interface StoreRow {
 
 export const live: SQL = sql.join(liveStates.map((state) => sql`${state}`), sql`, `);
 
-/** Stores by name with what a list says of each; the conditions keep the keyset and the viewer's scope. */
-export function storesView(db: ProducerDb, where: SQL, limit: number): StoreRow[] {
+/**
+ * Stores by name with what a list says of each; `where` keeps the keyset and the viewer's scope, `readable` which
+ * requests are counted.
+ */
+export function storesView(db: ProducerDb, where: SQL, readable: SQL, limit: number): StoreRow[] {
   const rows = db.view<Omit<StoreRow, 'freezers'> & { freezers: string }>(
     (producer) => sql`
     select ${stores.id} as id, ${stores.name} as name, ${stores.street} as street, ${stores.city} as city,
       ${stores.timeZone} as "timeZone", ${districts.name} as district, ${accounts.name} as account,
       ${nextTrucks.from} as "truckFrom", ${nextTrucks.to} as "truckTo",
-      (select count(*) from ${requests} r
-        where r.producer_id = ${producer} and r.store_id = ${stores.id} and r.state in (${live})) as "openRequests",
+      (select count(*) from ${requests}
+        where ${requests.producerId} = ${producer} and ${requests.storeId} = ${stores.id}
+          and ${requests.state} in (${live}) and ${readable}) as "openRequests",
       (select json_group_array(json_object(
           'at', st.at, 'share', st.share, 'pounds', st.pounds, 'capacityPounds', st.capacity_pounds,
           'warmSince', st.warm_since, 'runOutLikely', st.run_out_likely,

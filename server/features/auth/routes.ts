@@ -3,7 +3,8 @@ import type { Request } from 'express';
 import { api } from '../../contract';
 import { limit } from '../../http/limits';
 import { route } from '../../http/route';
-import { endOwnSession, startSession } from '../../http/session';
+import { endOwnSession, startSession, whoIs } from '../../http/session';
+import { presentMe } from '../me/present';
 import type { MagicLink } from './magic-link';
 
 const addressed = (req: Request): string => {
@@ -32,6 +33,11 @@ export const authRoutes = (links: MagicLink) => [
     },
     ({ patience }) => [limit({ seconds: 600, most: 40 }, patience)],
   ),
+
+  route(api.auth.readSession, (services, { req }) => {
+    const found = whoIs(services, req);
+    return { me: found && presentMe(services.system, found.personId, services.now()) };
+  }),
 
   route(api.auth.signOut, async (_ctx, { req }) => {
     await endOwnSession(req);

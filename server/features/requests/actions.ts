@@ -1,5 +1,5 @@
 import type { Body } from '../../contract/endpoint';
-import type { changeRequest as changeEndpoint, fileRequest as fileEndpoint, RequestSummary } from '../../contract/requests';
+import type { changeRequest as changeEndpoint, fileRequest as fileEndpoint, Request, RequestSummary } from '../../contract/requests';
 import type { EntryKind, Language, RequestState } from '../../contract/words';
 import { and, eq, requestEntries, requests } from '../../db';
 import { memberById } from '../../db/views/people';
@@ -140,7 +140,13 @@ export function load(tx: Pick<ActionTx, 'db'>, id: string, ctx?: ProducerContext
 }
 
 /** What rules ask about a request. */
-export const ruled = ({ id, storeId, kind, assignee }: RequestSummary) => ({ id, storeId, kind, assigneeId: assignee?.id ?? null });
+export const ruled = ({ id, storeId, kind, assignee, openedBy }: RequestSummary & Pick<Request, 'openedBy'>) => ({
+  id,
+  storeId,
+  kind,
+  assigneeId: assignee?.id ?? null,
+  openedBy: openedBy?.id ?? null,
+});
 
 function stepOf({ now }: ProducerContext, request: Loaded, change: Body<typeof changeEndpoint>) {
   const state: RequestState = change.state ?? request.state;

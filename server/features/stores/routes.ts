@@ -4,7 +4,7 @@ import type { Attention } from '../../contract/stores';
 import { allowed, and, gte, lt, nextTrucks, or, sql, stores, type SQL } from '../../db';
 import { deliveriesOfStore, nextTruckOfStore } from '../../db/views/deliveries';
 import { freezersOfStore } from '../../db/views/freezers';
-import { recentRequestsOfStore } from '../../db/views/requests';
+import { readableRequests, recentRequestsOfStore } from '../../db/views/requests';
 import { hasTruck, noTruck, storesView, storeView, type StoreRow } from '../../db/views/stores';
 import { attentionOf } from '../../domain/attention';
 import { addDays, dayOf, startOfDay } from '../../domain/civil';
@@ -23,7 +23,7 @@ export const storesRoutes = [
       query.truck ? truckIs(query.truck, now, producer.timeZone) : undefined,
       query.truck ? allowed(ability, 'read', 'NextTruck', { storeId: stores.id }) : undefined,
     );
-    const page = pageOf(storesView(db, where ?? sql`1`, limit + 1), limit, ({ name, id }) => [name, id]);
+    const page = pageOf(storesView(db, where ?? sql`1`, readableRequests(ability), limit + 1), limit, ({ name, id }) => [name, id]);
     return { stores: page.rows.map((store) => summary(store, ability, now)), next: page.next };
   }),
 

@@ -4,7 +4,7 @@ import { useTranslation } from 'react-i18next';
 import { api } from '../../../server/contract/index';
 import type { Request } from '../../../server/contract/requests';
 import { nextSteps } from '../../../server/domain/request-steps';
-import { q } from '../../api/query';
+import { invalidate, q } from '../../api/query';
 import { Form } from '../../form/form';
 import { SelectField } from '../../form/select-field';
 import { SubmitButton } from '../../form/submit-button';
@@ -40,6 +40,7 @@ export function Change({ request }: { request: Request }) {
   const look = async () => {
     see(await queryClient.fetchQuery({ ...q(api.requests.read, { params }), staleTime: 0 }));
     setLooked(true);
+    void invalidate(api.requests.list);
   };
 
   return (

@@ -48,10 +48,11 @@ function ListPane({ list, open }: Props & { open: string | undefined }) {
   const { side } = useMembership();
   const searchRef = useRef<HTMLInputElement>(null);
   const title = side === 'store' ? t('title-store') : t('title');
+  const Heading = open ? 'h2' : 'h1';
   return (
     <section aria-label={t('list.label')} className={side === 'store' ? '-mx-4 max-w-3xl' : `${beside} ${open ? 'hidden lg:block' : ''}`}>
       {!open && <PageTitle title={title} />}
-      <h1 className="px-4 pt-5 pb-3 text-title font-bold lg:pt-6">{title}</h1>
+      <Heading className="px-4 pt-5 pb-3 text-title font-bold lg:pt-6">{title}</Heading>
       <QueueFilters searchRef={searchRef} />
       <Rows requests={list.requests} open={open} />
       <div className="px-4">

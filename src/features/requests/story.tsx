@@ -37,7 +37,9 @@ export function Story({ request, fresh }: Props) {
 
 function StoryEntry({ entry, format, fresh }: { entry: Entry; format: Format; fresh: boolean }) {
   const { t } = useTranslation(['requests', 'common']);
-  const { author, kind, words } = entry;
+  const { author, kind } = entry;
+  // What photos carry is their count.
+  const words = kind === 'photos' ? '' : entry.words;
   const by = author ? t('entries.by', { name: author.name, role: t(`common:roles.${author.role}`) }) : t('entries.nilas');
   const when = (
     <>
@@ -75,7 +77,7 @@ function Happened({ entry, format }: { entry: Entry; format: Format }) {
     const said = state === 'scheduled' && day ? t('states.scheduled-day', { day: format.day(day) }) : t(`states.${state}`);
     return <p className="text-ink-2">{t('entries.state', { state: said })}</p>;
   }
-  return <p className="text-ink-2">{t(`entries.${kind}`)}</p>;
+  return <p className="text-ink-2">{kind === 'photos' ? t('entries.photos', { count: Number(entry.words) || 1 }) : t(`entries.${kind}`)}</p>;
 }
 
 const tones: Record<Entry['kind'], TimelineTone> = {

@@ -6,6 +6,7 @@ import { useMembership } from '../../lib/me';
 import { useFormat } from '../../lib/format';
 import { paths } from '../../paths';
 import { AttentionTag } from './attention-tag';
+import { useStoreWords } from './use-store-words';
 
 interface Props {
   store: StoreSummary;
@@ -16,7 +17,7 @@ interface Props {
 export function StoresListRow({ store, now }: Props) {
   const { t } = useTranslation('stores-list');
   const { producer, side } = useMembership();
-  const format = useFormat(side === 'store' ? store.timeZone : producer.timeZone);
+  const format = useStoreWords(side === 'store' ? store.timeZone : producer.timeZone, now);
   const { nextTruck, openRequests, runOutLikely } = store;
   return (
     <tr role="row" className="relative grid grid-cols-2 gap-x-4 gap-y-2 rounded-card border border-rule bg-surface p-4 hover:bg-ice-3 lg:table-row lg:rounded-none lg:border-0 lg:p-0">
@@ -33,7 +34,7 @@ export function StoresListRow({ store, now }: Props) {
       </td>
       <td role="cell" className={cell}>
         <Narrow label={t('columns.run-out')} />
-        {runOutLikely === null ? t('no-run-out') : format.when(runOutLikely)}
+        <span className="block first-letter:uppercase">{runOutLikely === null ? t('no-run-out') : format.partOfDay(runOutLikely)}</span>
       </td>
       <td role="cell" className={cell}>
         <Narrow label={t('columns.truck')} />
@@ -44,7 +45,7 @@ export function StoresListRow({ store, now }: Props) {
         {openRequests > 0 ? t('requests', { count: openRequests }) : t('no-requests')}
       </td>
       <td role="cell" className={`${cell} order-first col-span-2 lg:order-none`}>
-        <AttentionTag attention={store.attention} />
+        <AttentionTag attention={store.attention} truck={nextTruck !== null} />
       </td>
     </tr>
   );

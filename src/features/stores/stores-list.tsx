@@ -18,7 +18,7 @@ import { useNow } from './use-now';
 const EVERY = 60_000;
 
 export const storesList = page({
-  words: ['stores-list'],
+  words: ['stores-list', 'store'],
   queries: (place) => ({
     list: q(api.stores.list, { params: { producer: place.params.producer ?? '' }, query: queryOf(place) }, { everyMs: EVERY }),
   }),

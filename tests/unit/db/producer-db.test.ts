@@ -34,6 +34,8 @@ test('a join sees its own rows on both sides', () => {
   const rows = own.select({ store: stores.name, district: districts.name }).from(stores).innerJoin(districts, eq(districts.id, stores.districtId)).all();
   expect(rows).toHaveLength(4);
   expect(JSON.stringify(rows)).not.toContain(twin.mark);
+  const either = own.select({ freezer: freezers.assetNumber }).from(stores).innerJoin(freezers, sql`1 = 0 or ${freezers.storeId} = ${stores.id}`).all();
+  expect(either).toHaveLength(4);
   const left = own.select({ store: stores.name, freezer: freezers.assetNumber }).from(stores).leftJoin(freezers, eq(freezers.storeId, stores.id)).where(undefined).all();
   expect(left).toHaveLength(4);
   expect(JSON.stringify(left)).not.toContain(twin.mark);
@@ -72,6 +74,15 @@ test('insert and upsert write for its own producer, whatever is smuggled in', ()
   own.upsert(counters, { id: 'request', value: 9 }, { value: 9 });
   expect(own.find(counters, 'request')?.value).toBe(9);
   expect(theirs.find(counters, 'request')?.value).toBe(1700);
+});
+
+test('a patch moves no row to another producer, whatever is smuggled in', () => {
+  const smuggled = { value: 5, producerId: idOf(birch.slug, 'producer') };
+  own.insert(counters, { id: 'visits', value: 1 });
+  own.update(counters, 'visits', smuggled);
+  own.upsert(counters, { id: 'visits', value: 6 }, smuggled);
+  expect(theirs.find(counters, 'visits')).toBeUndefined();
+  expect(own.find(counters, 'visits')?.value).toBe(5);
 });
 
 test('a hand-written view is held to its producer by the watch', () => {

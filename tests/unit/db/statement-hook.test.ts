@@ -25,7 +25,18 @@ describe('refused', () => {
     ['an update or ignore', 'update or ignore store set name = ?'],
     ['a delete', 'delete from "store" where "store"."id" = ?'],
     ['a predicate only in a text', "select * from store where name = 'producer_id = 1'"],
-    ['other spelling', 'SELECT * FROM STORE'.replace('STORE', 'store')],
+    ['capital letters', 'SELECT * FROM store WHERE id = ?'],
+    ['a capital name', 'select * from STORE where id = ?'],
+    ['a list of tables', 'select * from store s, freezer f where s.producer_id = ?'],
+    ['a schema before the name', 'select * from main.store where id = ?'],
+    ['brackets around the name', 'select * from [store] where id = ?'],
+    ['ticks around the name', 'select * from `store` where id = ?'],
+    ['the table in brackets', 'select * from (store) where id = ?'],
+    ['a predicate only in a comment', 'select * from store where id = ? -- producer_id = ?'],
+    ['a predicate only in a long comment', 'select * from store /* producer_id = ? */ where id = ?'],
+    ['a predicate that says nothing', 'select * from store where producer_id = producer_id'],
+    ['a predicate undone', 'select * from store where producer_id = ? or 1'],
+    ['what an update sets', 'update store set producer_id = ? where id = ?'],
   ])('%s', (_what, source) => {
     expect(unscoped(source)).not.toBeNull();
     expect(() => db.$client.prepare(source)).toThrow(/without its producer/);

@@ -6,7 +6,7 @@ import { addDays, dayOf, hourOf, instantOf, midnights, startOfDay, weekdayOf } f
 const zone = 'America/Chicago';
 const HOUR = 3_600_000;
 const instants = fc.integer({ min: Date.UTC(2020, 0, 1), max: Date.UTC(2035, 0, 1) });
-const zones = fc.constantFrom('America/Chicago', 'America/New_York', 'America/Phoenix', 'Pacific/Honolulu', 'Europe/Madrid', 'UTC');
+const zones = fc.constantFrom('America/Chicago', 'America/New_York', 'America/Phoenix', 'Pacific/Honolulu', 'America/Havana', 'Asia/Kathmandu', 'Australia/Lord_Howe', 'UTC');
 const zoned = (at: number, timeZone: string) => Temporal.Instant.fromEpochMilliseconds(at).toZonedDateTimeISO(timeZone);
 
 describe('civil time against Temporal', () => {

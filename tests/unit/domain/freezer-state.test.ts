@@ -60,7 +60,20 @@ describe('the state of a freezer', () => {
     expect(Math.max(...around) - Math.min(...around)).toBeGreaterThan(0.4);
   });
 
-  test('it depends on the set of readings alone', () => {
+  /** A pool of few times, so that moments contradict each other; spikes, silence, and what is no number. */
+  const value = fc.oneof(fc.double({ min: 0, max: 60, noNaN: true }), fc.constantFrom(10, 12, 30, null), fc.double());
+  const anyReading = fc.record({
+    at: fc.oneof(
+      fc.integer({ min: 0, max: 60 }).map((i) => start + i * HALF_HOUR),
+      fc.integer({ min: start, max: start + 9 * DAY }),
+      fc.constantFrom(Number.NaN, -1, 1e300, 0, Date.UTC(2200, 0, 1)),
+    ),
+    distancesIn: fc.array(value, { maxLength: 5 }),
+    airF: fc.oneof(fc.double({ min: -100, max: 200, noNaN: true }), fc.constantFrom(null, Number.NaN)),
+    supplyV: value,
+  });
+
+  test('it depends on the set of readings alone: a week, any order, any repeats', () => {
     const some = days.slice(-100);
     const expected = fold(some);
     fc.assert(
@@ -71,21 +84,56 @@ describe('the state of a freezer', () => {
     );
   });
 
-  test('any readings at all: no crash, no NaN', () => {
-    const value = fc.oneof(fc.double(), fc.constant(null), fc.double({ min: 0, max: 60, noNaN: true }));
-    const any = fc.record({
-      at: fc.integer({ min: start, max: start + 9 * DAY }),
-      distancesIn: fc.array(value, { maxLength: 5 }),
-      airF: fc.oneof(fc.double({ min: -100, max: 200, noNaN: true }), fc.constant(null)),
-      supplyV: fc.constant(null),
+  test('it depends on the set of readings alone: contradictions, spikes and rubbish', () => {
+    const told = fc.array(anyReading, { maxLength: 40 }).chain((list) => {
+      const length = list.length * 2;
+      return fc.tuple(fc.constant(list), fc.shuffledSubarray([...list, ...list], { minLength: length, maxLength: length }));
     });
     fc.assert(
-      fc.property(fc.array(any, { maxLength: 60 }), (readings) => {
-        expect(JSON.stringify(fold(readings) ?? {})).not.toMatch(/NaN|Infinity/);
-        const state = fold(readings);
-        if (state) expect(Number.isFinite(state.level.pounds) && Number.isFinite(state.level.sdPounds)).toBe(true);
+      fc.property(told, ([list, shuffled]) => {
+        expect(fold(shuffled)).toEqual(fold(list));
       }),
     );
+  });
+
+  const isSound = (found: unknown): boolean =>
+    typeof found === 'number' ? Number.isFinite(found) : found === null || typeof found !== 'object' || Object.values(found).every(isSound);
+
+  test('any readings in any freezer: no crash, every number finite', () => {
+    const size = fc.oneof(fc.double({ min: 1, max: 100, noNaN: true }), fc.constantFrom(0, -1, Number.NaN, Infinity));
+    const usual = fc.double({ min: 20, max: 60, noNaN: true });
+    const drop = fc.oneof({ weight: 9, arbitrary: fc.double({ min: 0, max: 5, noNaN: true }) }, { weight: 1, arbitrary: size });
+    const length = fc.oneof({ weight: 9, arbitrary: usual }, { weight: 1, arbitrary: size });
+    const anySetup: fc.Arbitrary<FreezerSetup> = fc.record({
+      model: fc.record({ insideWidthIn: length, insideDepthIn: length, insideHeightIn: length, ratedPounds: length }),
+      mount: fc.record({ channelDropIn: drop, rackIn: drop, headroomIn: drop, probesIn: fc.array(drop, { maxLength: 4 }) }),
+      lanes: fc.integer({ min: 0, max: 4 }).chain((count) =>
+        fc.array(fc.record({ productId: fc.constant('ice'), widthShare: fc.constant(1 / count), bagPounds: length }), { minLength: count, maxLength: count }),
+      ),
+    });
+    let known = 0;
+    fc.assert(
+      fc.property(anySetup, fc.array(anyReading, { maxLength: 60 }), (given, readings) => {
+        const state = foldState({ setup: given, timeZone, readings });
+        if (state) known += 1;
+        expect(isSound(state)).toBe(true);
+      }),
+      { numRuns: 300 },
+    );
+    expect(known).toBeGreaterThan(30);
+  });
+
+  test('no readings, and readings without a live probe, are no state', () => {
+    expect(fold([])).toBeNull();
+    expect(fold([{ at: start, distancesIn: [null, -4, 900], airF: 18, supplyV: 12 }])).toBeNull();
+  });
+
+  test('the air goes on being heard when every probe is dead', () => {
+    const silent = Array.from({ length: 20 }, (_, i) => ({ at: start + (i + 1) * HALF_HOUR, distancesIn: [null, null, null], airF: 20 + i, supplyV: null }));
+    const state = fold([reading(0, 300, 200), ...silent]);
+    // The level is as old as the last word of a probe.
+    expect(state?.at).toBe(start);
+    expect(state).toMatchObject({ airF: 39, airAt: start + 20 * HALF_HOUR, warmSince: start + 14 * HALF_HOUR, supplyV: 11.9 });
   });
 
   test('a setup that cannot be gives no state', () => {

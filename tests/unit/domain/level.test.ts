@@ -62,12 +62,21 @@ describe('level by hand', () => {
     expect(level([14.5, null, 34.5], oneLane).pounds).toBeCloseTo((900 / 41.5) * 20, 9);
   });
 
-  test('a lane whose own probe is dead reads the one at the boundary, then borrows, and says so', () => {
-    const near = level([20, 25, null]);
-    expect(near.lanes[1]).toMatchObject({ stackIn: 19.5, borrowed: false });
-    const borrowed = level([20, null, null]);
-    expect(borrowed.lanes[1]).toMatchObject({ stackIn: 24.5, borrowed: true });
-    expect(borrowed.lanes[1]?.sdPounds).toBeGreaterThan(2 * (borrowed.lanes[0]?.sdPounds ?? Infinity) * 0.9);
+  test('a lane whose own probe is dead reads the one at the boundary, then borrows, each less sure', () => {
+    const sure = level([20, 25, 25]).lanes[1];
+    const near = level([20, 25, null]).lanes[1];
+    const borrowed = level([25, null, null]).lanes[1];
+    expect(near).toMatchObject({ stackIn: 19.5, borrowed: false });
+    expect(borrowed).toMatchObject({ stackIn: 19.5, borrowed: true });
+    // One more sd of 12 % and of 25 % of a full lane of 450 lb.
+    expect(near?.sdPounds).toBeCloseTo(Math.hypot(sure?.sdPounds ?? 0, 0.12 * 450), 6);
+    expect(borrowed?.sdPounds).toBeCloseTo(Math.hypot(sure?.sdPounds ?? 0, 0.25 * 450), 6);
+  });
+
+  test('more rated pounds than solid ice would weigh are cut to that', () => {
+    // 58 × 27 in by a stack of 20 in is 31,320 cubic inches, or 18.125 cubic feet, of 57.229 lb each.
+    const heavy = { ...oneLane, model: { ...oneLane.model, ratedPounds: 90_000 } };
+    expect(level([24.5, 24.5, 24.5], heavy).pounds).toBeCloseTo(1037.3, 0);
   });
 
   test('no live probe is no level', () => {
@@ -77,17 +86,28 @@ describe('level by hand', () => {
   });
 
   test('whole bags are not lost to arithmetic', () => {
-    const exact: FreezerSetup = { ...setup, model: { ...setup.model, ratedPounds: 830 }, lanes: [{ productId: 'ten', widthShare: 1, bagPounds: 10 }] };
-    // 20 lb an inch: 30 in are 600 lb exactly.
-    expect(level([14.5, 14.5, 14.5], exact).lanes[0]?.bags).toBe(60);
+    const uneven: FreezerSetup = {
+      model: { ...setup.model, insideWidthIn: 60, ratedPounds: 830 },
+      mount: { ...setup.mount, probesIn: [5, 30, 55] },
+      lanes: [0.2, 0.8].map((widthShare) => ({ productId: 'seven', widthShare, bagPounds: 7 })),
+    };
+    // 16 lb an inch by 28 in are 448 lb or 64 bags; in floating point 63.99999999999999.
+    const lane = level([16.5, 16.5, 16.5], uneven).lanes[1];
+    expect(Math.floor((lane?.pounds ?? 0) / 7)).toBe(63);
+    expect(lane?.bags).toBe(64);
+  });
+
+  test('thirds written with three digits are a whole width', () => {
+    const thirds = { ...setup, lanes: [1, 2, 3].map((n) => ({ productId: `${n}`, widthShare: 0.333, bagPounds: 10 })) };
+    expect(level([20, 25, 30], thirds).lanes.map(({ stackIn }) => stackIn)).toEqual([24.5, 19.5, 14.5]);
   });
 });
 
 describe('how sure', () => {
   test('more probes see more columns', () => {
     const lane = oneLane.lanes[0]!;
-    const one = stackSdIn(oneLane, lane, { weights: [[0, 1]], borrowed: false });
-    const three = stackSdIn(oneLane, lane, { weights: [[0, 1 / 3], [1, 1 / 3], [2, 1 / 3]], borrowed: false });
+    const one = stackSdIn(oneLane, lane, { weights: [[0, 1]], seen: 'own' });
+    const three = stackSdIn(oneLane, lane, { weights: [[0, 1 / 3], [1, 1 / 3], [2, 1 / 3]], seen: 'own' });
     expect(three).toBeCloseTo(one / Math.sqrt(3), 9);
   });
 
@@ -106,6 +126,10 @@ describe('what cannot be', () => {
     ['no-lanes', { ...setup, lanes: [] }],
     ['probe-outside', { ...setup, mount: { ...setup.mount, probesIn: [10, 70] } }],
     ['no-stack', { ...setup, mount: { ...setup.mount, channelDropIn: 50 } }],
+    ['no-stack', { ...setup, mount: { ...setup.mount, rackIn: -1 } }],
+    ['no-stack', { ...setup, mount: { ...setup.mount, headroomIn: Number.NaN } }],
+    ['shares', { ...oneLane, lanes: [{ productId: 'a', widthShare: 1, bagPounds: 0 }] }],
+    ['model', { ...setup, model: { ...setup.model, ratedPounds: Infinity } }],
     ['no-probes', { ...setup, mount: { ...setup.mount, probesIn: [] } }],
     ['model', { ...setup, model: { ...setup.model, insideDepthIn: 0 } }],
   ])('%s is named and gives no level', (fault, given) => {

@@ -107,9 +107,9 @@ describe('what a store needs looked at', () => {
   const truck = { from: at + 3 * DAY, to: at + 3 * DAY + 1 };
   test.each([
     ['none', [fine], truck],
-    ['warm', [fine, { ...fine, warmSince: at, share: 0 }], truck],
-    ['empty', [{ ...fine, share: 0.01 }], truck],
-    ['truck-late', [{ ...fine, runOutLikely: at }], { from: at - 2, to: at - 1 }],
+    ['warm', [fine, { ...fine, warmSince: at, runOutLikely: at }], truck],
+    ['empty', [fine, { ...fine, runOutLikely: at }], truck],
+    ['truck-late', [{ ...fine, runOutLikely: at + 1 }], { from: at - 2, to: at - 1 }],
     ['runs-out-first', [{ ...fine, runOutLikely: at + 2 * DAY }], truck],
     ['silent', [{ ...fine, at: null, share: null, runOutLikely: null }], truck],
     ['none', [{ ...fine, sensor: false, at: null, share: null, runOutLikely: null }], truck],

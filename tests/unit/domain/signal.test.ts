@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
+import { instantOf, midnights } from '../../../server/domain/civil';
 import { cleanDistances, isotonicNonIncreasing, median, orderedReadings } from '../../../server/domain/signal';
 import { dailyRate, salesBetween, salesByDay } from '../../../server/domain/sales';
 
@@ -18,7 +19,9 @@ describe('spikes', () => {
 
   test('the youngest reading of a lone probe waits for a second one', () => {
     expect(probe([20, 20, 20, 20, 6])).toEqual([20, 20, 20, 20, 20]);
-    expect(probe([20, 20, 20, 20, 6, 6, 6]).at(-1)).toBe(6);
+    expect(probe([20, 20, 20, 20, 6, 20])).toEqual([20, 20, 20, 20, 20, 20]);
+    expect(probe([20, 20, 20, 20, 6, 6])).toEqual([20, 20, 20, 20, 6, 6]);
+    expect(probe([20, 20, 20, 20, 6, 6, 6])).toEqual([20, 20, 20, 20, 6, 6, 6]);
   });
 
   test('several probes that rise together are believed at once', () => {
@@ -53,20 +56,32 @@ describe('order', () => {
   });
 });
 
+describe('what is no reading', () => {
+  test('no time, no number, an impossible distance: as if the sensor had said nothing', () => {
+    const odd = { at: 7, distancesIn: [Number.NaN, Infinity, -1, 20], airF: Number.NaN, supplyV: -Infinity };
+    const nowhen = [Number.NaN, -1, Infinity, 9e15].map((at) => ({ ...odd, at }));
+    const possible = (distanceIn: number | null) => (distanceIn !== null && distanceIn >= 0 ? distanceIn : null);
+    expect(orderedReadings([...nowhen, odd], possible)).toEqual([{ at: 7, distancesIn: [null, null, null, 20], airF: null, supplyV: null }]);
+  });
+});
+
 /** Every partition of 0…n−1 into runs, each run at its mean: the best non-increasing one is the isotonic fit. */
-function bruteForce(values: number[]): number[] {
+function bruteForce(values: number[], weights: number[]): number[] {
+  const weightOf = (from: number, to: number) => weights.slice(from, to).reduce((sum, one) => sum + one, 0);
   let best: { cost: number; fit: number[] } | null = null;
   for (let cuts = 0; cuts < 2 ** (values.length - 1); cuts += 1) {
     const fit: number[] = [];
     let from = 0;
     for (let i = 0; i < values.length; i += 1) {
       if (i + 1 < values.length && !(cuts & (1 << i))) continue;
-      const run = values.slice(from, i + 1);
-      fit.push(...run.map(() => run.reduce((sum, one) => sum + one, 0) / run.length));
+      const start = from;
+      const run = values.slice(start, i + 1);
+      const mean = run.reduce((sum, one, j) => sum + one * (weights[start + j] ?? 0), 0) / weightOf(start, i + 1);
+      fit.push(...run.map(() => mean));
       from = i + 1;
     }
     if (fit.some((one, i) => i > 0 && one > (fit[i - 1] ?? 0) + 1e-12)) continue;
-    const cost = fit.reduce((sum, one, i) => sum + (one - (values[i] ?? 0)) ** 2, 0);
+    const cost = fit.reduce((sum, one, i) => sum + (weights[i] ?? 0) * (one - (values[i] ?? 0)) ** 2, 0);
     if (!best || cost < best.cost - 1e-12) best = { cost, fit };
   }
   return best?.fit ?? [];
@@ -75,9 +90,17 @@ function bruteForce(values: number[]): number[] {
 describe('isotonic fit', () => {
   test('equals the best of all partitions for up to eight values', () => {
     fc.assert(
-      fc.property(fc.array(fc.integer({ min: -50, max: 50 }), { minLength: 1, maxLength: 8 }), (values) => {
-        const fit = isotonicNonIncreasing(values);
-        bruteForce(values).forEach((one, i) => expect(fit[i]).toBeCloseTo(one, 9));
+      fc.property(fc.array(fc.tuple(fc.integer({ min: -50, max: 50 }), fc.integer({ min: 1, max: 9 })), { minLength: 1, maxLength: 8 }), (pairs) => {
+        const values = pairs.map(([value]) => value);
+        const weights = pairs.map(([, weight]) => weight);
+        const same = values.map(() => 1);
+        for (const [fit, best] of [
+          [isotonicNonIncreasing(values, weights), bruteForce(values, weights)],
+          [isotonicNonIncreasing(values), bruteForce(values, same)],
+        ] as const) {
+          expect(fit).toHaveLength(values.length);
+          best.forEach((one, i) => expect(fit[i]).toBeCloseTo(one, 9));
+        }
       }),
     );
   });
@@ -94,13 +117,45 @@ describe('sales', () => {
     expect(salesBetween(pounds, [4])[4]).toBe(0);
   });
 
-  test('noise alone sells next to nothing', () => {
-    let seed = 1;
-    const noise = () => ((seed = (seed * 48_271) % 2_147_483_647) / 2_147_483_647 - 0.5) * 6;
-    const steady = Array.from({ length: 336 }, () => 400 + noise());
-    const sold = salesBetween(steady, []).reduce((sum, one) => sum + one, 0);
-    // A week of readings with 3 lb of noise either way: summing raw falls would make about 500 lb.
-    expect(sold).toBeLessThan(3);
+  /** Normal noise of one sd of 3 lb, what 0.3 in of a probe means at 10 lb an inch (Box and Muller 1958). */
+  const noisy = (seed: number) => {
+    let state = seed;
+    const uniform = () => (state = (state * 48_271) % 2_147_483_647) / 2_147_483_647;
+    return () => 3 * Math.sqrt(-2 * Math.log(uniform())) * Math.cos(2 * Math.PI * uniform());
+  };
+  const week = 336;
+  const soldOf = (pounds: number[]) => salesBetween(pounds, []).reduce((sum, one) => sum + one, 0);
+
+  test('noise alone sells next to nothing: under 2 lb a week, where raw falls would make over 500', () => {
+    const weeks = Array.from({ length: 100 }, (_, n) => {
+      const noise = noisy(n + 1);
+      return Array.from({ length: week }, () => 400 + noise());
+    });
+    const raw = weeks.map((pounds) => pounds.reduce((sum, one, i) => sum + Math.max(0, (pounds[i - 1] ?? one) - one), 0));
+    expect(Math.min(...raw)).toBeGreaterThan(450);
+    expect(weeks.reduce((sum, pounds) => sum + soldOf(pounds), 0) / weeks.length).toBeLessThan(2);
+  });
+
+  test.each([
+    ['a week', week, 350, 0.005],
+    ['a day', 48, 50, 0.02],
+  ])('noise on real sales of %s neither adds nor takes away', (_, count, sold, tolerance) => {
+    const found = Array.from({ length: 200 }, (_, n) => {
+      const noise = noisy(n + 1);
+      return soldOf(Array.from({ length: count }, (_, i) => 500 - (sold * i) / (count - 1) + noise()));
+    });
+    const mean = found.reduce((sum, one) => sum + one, 0) / found.length;
+    expect(Math.abs(mean / sold - 1)).toBeLessThan(tolerance);
+  });
+
+  test('a lane that ends no lower than it began sold nothing', () => {
+    expect(salesBetween([100, 90, 110], [])).toEqual([0, 0, 0]);
+  });
+
+  test('a steady 2 lb an hour over the night clocks change: days of 24, 23 and 24 hours', () => {
+    const starts = midnights(instantOf('2026-03-07', '12:00', 'America/Chicago'), instantOf('2026-03-09', '12:00', 'America/Chicago'), 'America/Chicago');
+    const hours = Array.from({ length: 72 }, (_, i) => (starts[0] ?? 0) + i * 3_600_000);
+    expect(salesByDay(hours, hours.map((_, i) => (i === 0 ? 0 : 2)), starts)).toEqual([48, 46, 48]);
   });
 
   test('a sale between two readings is shared among the days it touches', () => {

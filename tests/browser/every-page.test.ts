@@ -1,0 +1,86 @@
+import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import { alder, alderPeople, type Member } from '../cast';
+import { idOf } from '../factories';
+import { enterAs, faultsOf, openPortal, overflow, settled, type Portal } from './portal';
+
+/** Every page in both languages, both themes and three widths: nothing for axe, nothing beyond the edge, no complaint. */
+let portal: Portal;
+beforeAll(async () => {
+  portal = await openPortal();
+});
+afterAll(() => portal.close());
+
+const id = (thing: string) => idOf(alder.namespace, thing);
+const at = `/${alder.slug}`;
+const store = `${at}/stores/${id('lantern')}`;
+const { manager, managerOfThree, rep, agent, dispatcher, driver, technician, admin } = alderPeople;
+
+const pages: [name: string, person: Member | null, path: string][] = [
+  ['sign-in', null, '/sign-in'],
+  ['confirm', null, '/sign-in/confirm#token=x&next=%2F'],
+  ['store page', manager, store],
+  ['store page for dispatch', dispatcher, store],
+  ['chooser of several stores', managerOfThree, `${at}/stores`],
+  ['assigned stores', rep, `${at}/stores`],
+  ['stores with today’s truck', driver, `${at}/stores?truck=today`],
+  ['no store found', admin, `${at}/stores?q=zzzz`],
+  ['report: what', manager, `${store}/report`],
+  ['report: the rest', manager, `${store}/report?kind=leak&freezer=${id('lantern freezer')}`],
+  ['ask for ice', manager, `${store}/ask-for-ice`],
+  ['past deliveries', manager, `${store}/deliveries`],
+  ['record a delivery', dispatcher, `${store}/deliveries/new`],
+  ['set the next truck', dispatcher, `${store}/next-truck`],
+  ['service queue', agent, `${at}/requests`],
+  ['a request for staff', agent, `${at}/requests/${id('cold request')}`],
+  ['a request for its store', manager, `${at}/requests/${id('cold request')}`],
+  ['requests of a technician', technician, `${at}/requests?assignee=me`],
+  ['nothing asked', admin, `${at}/requests?state=cancelled`],
+  ['profile', manager, '/profile'],
+];
+
+const looks = [
+  { width: 320, dark: false },
+  { width: 390, dark: true },
+  { width: 1440, dark: false },
+  { width: 1440, dark: true },
+];
+
+describe.each(['en', 'es'] as const)('in %s', (language) => {
+  test.each(pages)('%s', async (_name, person, path) => {
+    const visit = await portal.visit({ language });
+    const { page, context, complaints } = visit;
+    if (person) {
+      await enterAs(visit, portal, person);
+      await context.request.patch(`${portal.url}/api/me`, { data: { language }, headers: { origin: portal.url } });
+    }
+    await page.goto(path);
+    await settled(page);
+    expect(await page.locator('html').getAttribute('lang')).toBe(language);
+    expect(await page.getByRole('heading', { level: 1 }).count()).toBe(1);
+    for (const { width, dark } of looks) {
+      await page.setViewportSize({ width, height: 900 });
+      await page.emulateMedia({ colorScheme: dark ? 'dark' : 'light' });
+      await settled(page);
+      const where = `${width} px, ${dark ? 'dark' : 'light'}`;
+      expect(await faultsOf(page), where).toEqual([]);
+      expect(await overflow(page), where).toBe(0);
+    }
+    expect(complaints).toEqual([]);
+    await context.close();
+  });
+});
+
+test('an address that is nowhere, and one of somebody else, look alike', async () => {
+  const visit = await portal.visit();
+  await enterAs(visit, portal, alderPeople.otherManager);
+  const texts: string[] = [];
+  for (const path of [store, `${at}/stores/${idOf('nowhere', 'nothing')}`, '/birch-ice/stores', '/no-such-producer/stores']) {
+    await visit.page.goto(path);
+    await visit.page.getByRole('heading', { level: 1 }).waitFor();
+    await settled(visit.page);
+    expect(await faultsOf(visit.page)).toEqual([]);
+    texts.push(await visit.page.getByRole('heading', { level: 1 }).innerText());
+  }
+  expect(new Set(texts).size).toBe(1);
+  await visit.context.close();
+});
