@@ -36,7 +36,7 @@ export function freePort(): Promise<number> {
 export async function startServer(entry: 'main' | 'demo', env: NodeJS.ProcessEnv, options: { before?: string[]; args?: string[]; patienceMs?: number } = {}): Promise<ServerProcess> {
   const { before = [], args = [], patienceMs = 30_000 } = options;
   const [program = '', ...rest] = [...before, process.execPath, path.join(root, `dist/server/${entry}.js`), ...args];
-  const child = spawn(program, rest, { env, cwd: root, stdio: ['ignore', 'pipe', 'pipe'] });
+  const child = spawn(program, rest, { env, cwd: root, stdio: ['ignore', 'pipe', 'pipe'], detached: true });
   let said = '';
   for (const stream of [child.stdout, child.stderr]) stream.on('data', (chunk: Buffer) => (said += chunk.toString()));
   const gone = new Promise<void>((resolve) => child.once('exit', () => resolve()));
@@ -50,7 +50,8 @@ export async function startServer(entry: 'main' | 'demo', env: NodeJS.ProcessEnv
     url,
     child,
     end: async (signal) => {
-      child.kill(signal);
+      // The whole group, since strace passes nothing on.
+      if (child.pid) process.kill(-child.pid, signal);
       await gone;
     },
   };
