@@ -43,7 +43,7 @@ export function buildApp(services: Services, clientFolder: string): Express {
   app.use(pinoHttp({ logger: log, genReqId: () => newId(), autoLogging: false }));
   app.use(securityHeaders(config.baseUrl.startsWith('https:')));
   app.use(compression());
-  app.use(['/api', '/dev'], refuseCrossSite(config.baseUrl), limit({ seconds: 60, most: 1200, key: addressOf }, patience));
+  app.use(['/api', '/dev'], refuseCrossSite(config.baseUrl), limit({ seconds: 60, most: 6000, key: addressOf }, hasDevDoors(config.mode) ? patience * 20 : patience));
   app.use(['/api', '/dev'], (_req, res, next) => {
     res.set('cache-control', 'no-store');
     next();

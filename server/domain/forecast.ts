@@ -29,23 +29,36 @@ export function forecastCurve({ at, lanes, rates, truck, from, to, stepMs }: For
   if (rates.every(({ days }) => days === 0)) return [];
   const capacity = lanes.reduce((total, lane) => total + lane.capacityPounds, 0);
   if (!(capacity > 0)) return [];
-  const before = (instant: number) => pointAt(lanes, rates, capacity, (instant - at) / DAY_MS, instant);
-  if (!truck || truck.at <= at || truck.at >= to) return times(from, to, stepMs).map(before);
+  const upTo = !truck || truck.at <= at || truck.at >= to ? to : truck.at;
+  const before = curveOf(lanes, rates, capacity, at, times(from, upTo, stepMs));
+  if (!truck || upTo === to) return before;
   const days = (truck.at - at) / DAY_MS;
   const refilled = lanes.map((lane, i) => {
     const left = Math.max(0, lane.pounds - (rates[i]?.poundsPerDay ?? 0) * days);
     return { ...lane, pounds: Math.min(lane.capacityPounds, left + (truck.pounds[i] ?? 0)) };
   });
-  const after = (instant: number) => pointAt(refilled, rates, capacity, (instant - truck.at) / DAY_MS, instant);
-  return [...times(from, truck.at, stepMs).map(before), ...times(truck.at, to, stepMs).map(after)];
+  return [...before, ...curveOf(refilled, rates, capacity, truck.at, times(truck.at, to, stepMs))];
 }
 
-function pointAt(lanes: ForecastInput['lanes'], rates: DailyRate[], capacity: number, days: number, at: number): ForecastPoint {
-  const left = lanes.reduce((total, { pounds }, i) => total + Math.max(0, pounds - (rates[i]?.poundsPerDay ?? 0) * days), 0);
-  const variance = rates.reduce((total, { sdPounds, days: seen }) => total + sdPounds ** 2 * (days + (seen > 0 ? days ** 2 / seen : 0)), 0);
-  const width = Z90 * Math.sqrt(Math.max(0, variance));
-  const share = (pounds: number) => Math.min(1, Math.max(0, pounds / capacity));
-  return { at, low: share(left - width), likely: share(left), high: share(left + width) };
+/** What is left never rises by itself, so neither does a bound of it. */
+function curveOf(lanes: ForecastInput['lanes'], rates: DailyRate[], capacity: number, since: number, instants: number[]): ForecastPoint[] {
+  let ceiling = 1;
+  return instants.map((at) => {
+    const point = pointAt(lanes, rates, capacity, (at - since) / DAY_MS);
+    ceiling = Math.min(ceiling, point.high);
+    return { ...point, at, high: ceiling };
+  });
+}
+
+/** Each lane's own 10, 50 and 90 %, summed. */
+function pointAt(lanes: ForecastInput['lanes'], rates: DailyRate[], capacity: number, days: number): Omit<ForecastPoint, 'at'> {
+  const share = (odds: number) =>
+    lanes.reduce((total, { pounds }, i) => {
+      const { poundsPerDay = 0, sdPounds = 0, days: seen = 0 } = rates[i] ?? {};
+      const sd = Math.sqrt(sdPounds ** 2 * (days + (seen > 0 ? days ** 2 / seen : 0)));
+      return total + Math.min(capacity, Math.max(0, pounds - poundsPerDay * days + odds * Z90 * sd));
+    }, 0) / capacity;
+  return { low: share(-1), likely: share(0), high: Math.min(1, share(1)) };
 }
 
 /** From `from` by steps, with `to` itself at the end. */

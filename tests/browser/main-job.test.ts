@@ -118,12 +118,12 @@ describe.each([390, 1440] as const)('the main job at %i px', (width) => {
     await agent.page.getByLabel('State', { exact: true }).last().selectOption('scheduled');
     await agent.page.getByLabel('Day of the visit').fill('2026-12-02');
     await agent.page.getByRole('button', { name: 'Save', exact: true }).click();
-    await agent.page.getByText(/Scheduled for/).first().waitFor();
+    await agent.page.getByText(/Scheduled/).first().waitFor();
     await sound(agent);
 
     await page.getByRole('link', { name: new RegExp(number) }).first().click();
     await page.getByText(answer).first().waitFor();
-    await page.getByText(/Programada para el/).first().waitFor();
+    await page.getByText(/Programada/).first().waitFor();
     await sound(manager);
     await manager.context.close();
     await agent.context.close();

@@ -82,6 +82,11 @@ describe('the ribbon’s right side', () => {
   test('the band holds the line', () => {
     for (const { low, likely, high } of forecastCurve({ ...base, truck: null })) expect(low <= likely && likely <= high).toBe(true);
   });
+  test('the band’s upper bound never rises by itself', () => {
+    const high = forecastCurve({ ...base, to: at + 14 * DAY, truck: null }).map((point) => point.high);
+    high.forEach((one, i) => expect(one).toBeLessThanOrEqual(high[i - 1] ?? 1));
+    expect(high.at(-1)).toBeLessThan(0.35);
+  });
   test('nothing is drawn before a whole day was seen', () => {
     expect(forecastCurve({ ...base, rates: rates.map((rate) => ({ ...rate, days: 0 })), truck: null })).toEqual([]);
   });
