@@ -64,6 +64,16 @@ async function linksTo(email: string): Promise<string[]> {
   return mails.filter((mail) => mail.to === email && /Nilas/.test(mail.subject)).map(({ links }) => links[0] ?? '');
 }
 
+/** The link in the mail that says it is scheduled, in her language. */
+async function newsOf(number: string): Promise<string> {
+  const find = async () => {
+    const mails = (await (await fetch(`${portal.url}/dev/mail.json`)).json()) as { to: string; subject: string; links: string[] }[];
+    return mails.find(({ to, subject }) => to === alderPeople.manager.email && subject.startsWith(`${number}: programada para el miércoles`));
+  };
+  await expect.poll(find, { timeout: 10_000 }).toBeDefined();
+  return (await find())?.links[0] ?? '';
+}
+
 const photo = () =>
   sharp({ create: { width: 640, height: 480, channels: 3, background: '#88aabb' } })
     .withExif({ IFD0: { Copyright: 'nobody' } })
@@ -118,12 +128,12 @@ describe.each([390, 1440] as const)('the main job at %i px', (width) => {
     await agent.page.getByLabel('State', { exact: true }).last().selectOption('scheduled');
     await agent.page.getByLabel('Day of the visit').fill('2026-12-02');
     await agent.page.getByRole('button', { name: 'Save', exact: true }).click();
-    await agent.page.getByText(/Scheduled/).first().waitFor();
+    await agent.page.getByText(/Scheduled Wed Dec 2/).first().waitFor();
     await sound(agent);
 
-    await page.getByRole('link', { name: new RegExp(number) }).first().click();
+    await page.goto(await newsOf(number));
     await page.getByText(answer).first().waitFor();
-    await page.getByText(/Programada/).first().waitFor();
+    await page.getByText(/Programada mié 2 dic/).first().waitFor();
     await sound(manager);
     await manager.context.close();
     await agent.context.close();

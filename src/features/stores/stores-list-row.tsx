@@ -19,6 +19,9 @@ export function StoresListRow({ store, now }: Props) {
   const { producer, side } = useMembership();
   const format = useStoreWords(side === 'store' ? store.timeZone : producer.timeZone, now);
   const { nextTruck, openRequests, runOutLikely } = store;
+  // A weekday says enough within a week.
+  const truckWords = (truck: { from: number; to: number }) =>
+    Math.abs(truck.from - now) < 6 * DAY_MS ? format.window(truck) : `${format.date(truck.from)}, ${format.times(truck)}`;
   return (
     <tr role="row" className="relative grid grid-cols-2 gap-x-4 gap-y-2 rounded-card border border-rule bg-surface p-4 hover:bg-ice-3 lg:table-row lg:rounded-none lg:border-0 lg:p-0">
       <th scope="row" role="rowheader" className={`${cell} col-span-2 font-normal`}>
@@ -38,7 +41,7 @@ export function StoresListRow({ store, now }: Props) {
       </td>
       <td role="cell" className={cell}>
         <Narrow label={t('columns.truck')} />
-        {nextTruck ? `${format.date(nextTruck.from)}, ${format.times(nextTruck)}` : t('no-truck')}
+        {nextTruck ? truckWords(nextTruck) : t('no-truck')}
       </td>
       <td role="cell" className={cell}>
         <Narrow label={t('columns.requests')} />
@@ -51,6 +54,7 @@ export function StoresListRow({ store, now }: Props) {
   );
 }
 
+const DAY_MS = 86_400_000;
 const cell = 'block align-middle lg:table-cell lg:border-t lg:border-rule lg:px-3 lg:py-1.5';
 
 /** The column's name, where there are no columns. */
