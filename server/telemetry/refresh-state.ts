@@ -1,5 +1,6 @@
-import { and, desc, eq, freezers, freezerStates, gt, gte, installs, isNull, readings, sensors, sql, type Database, type ProducerDb } from '../db';
+import { and, desc, eq, freezers, freezerStates, installs, isNull, sensors, sql, type Database, type ProducerDb } from '../db';
 import { freezersView } from '../db/views/freezers';
+import { recentReadings } from '../db/views/readings';
 import { foldState } from '../domain/freezer-state';
 import type { Reading } from '../domain/types';
 import { celsiusToFahrenheit, metresToInches } from '../domain/units';
@@ -15,7 +16,7 @@ export function refreshState(db: Database, scoped: ProducerDb, freezerId: string
   const state = foldState({
     setup: { model: freezer.model, mount: { ...freezer.mount, probesIn: install.probesIn }, lanes: freezer.lanes },
     timeZone: freezer.timeZone,
-    readings: recentReadings(db, install),
+    readings: readingsOf(db, install),
   });
   if (!state) return;
   const row = {
@@ -44,21 +45,13 @@ function currentInstall(db: ProducerDb, freezerId: string) {
     .get();
 }
 
-function recentReadings(db: Database, { no, from, probesIn }: { no: number; from: number; probesIn: number[] }): Reading[] {
-  const newest = db.select({ at: readings.at }).from(readings).where(eq(readings.sensorNo, no)).orderBy(desc(readings.at)).limit(1).get();
-  if (!newest) return [];
-  return db
-    .select()
-    .from(readings)
-    .where(and(eq(readings.sensorNo, no), gte(readings.at, from), gt(readings.at, newest.at - WINDOW_MS)))
-    .orderBy(readings.at)
-    .all()
-    .map(({ at, probes, airC, supplyV }) => ({
-      at,
-      distancesIn: probesIn.map((_, i) => inches(probes[i] ?? null)),
-      airF: airC === null ? null : celsiusToFahrenheit(airC),
-      supplyV,
-    }));
+function readingsOf(db: Database, { no, from, probesIn }: { no: number; from: number; probesIn: number[] }): Reading[] {
+  return recentReadings(db, no, from, WINDOW_MS).map(({ at, probes, airC, supplyV }) => ({
+    at,
+    distancesIn: probesIn.map((_, i) => inches(probes[i] ?? null)),
+    airF: airC === null ? null : celsiusToFahrenheit(airC),
+    supplyV,
+  }));
 }
 
 const inches = (metres: number | null): number | null => (metres === null ? null : metresToInches(metres));

@@ -46,7 +46,7 @@ function Sentence({ said, zone, now }: { said: ColdSaid; zone: string; now: numb
     case 'silent':
       return t(key, { when: say.when(said.heard) });
     case 'warm':
-      return `${t(key, { freezer: said.freezer, since: say.when(said.since) })} ${said.others > 0 ? t('answers.cold.said.warm-others', { count: said.others }) : ''}`;
+      return `${t(key, { freezer: said.freezer, since: say.whenBefore(said.since) })} ${said.others > 0 ? t('answers.cold.said.warm-others', { count: said.others }) : ''}`;
     case 'above-once':
       return t(key, { freezer: said.freezer });
     case 'holding':

@@ -36,7 +36,7 @@ export function storeWords(t: TFunction<'store'>, format: Format, now: number) {
     ...format,
     weekday,
     /** "6:10 am" today, "Mon Nov 30, 6:10 am" before. */
-    when: (at: number) => (dayOf(at, zone) === today ? format.time(at) : format.when(at)),
+    whenBefore: (at: number) => (dayOf(at, zone) === today ? format.time(at) : format.when(at)),
     partOfDay,
     /** The day of an instant. */
     dayName: (at: number) => weekday(dayOf(at, zone)),
