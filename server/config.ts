@@ -39,8 +39,6 @@ export function readConfig(mode: Mode, env: NodeJS.ProcessEnv): Config {
   const { PORT, HOST, DATA_DIR, BASE_URL, SESSION_SECRET, SMTP_URL, MAIL_FROM, TRUST_PROXY, LOG_LEVEL } = parsed.data;
   const dataDir = path.resolve(DATA_DIR);
   mkdirSync(dataDir, { recursive: true, mode: 0o700 });
-  if (mode === 'production' && !BASE_URL) throw new Error('Set BASE_URL to the address people reach this portal at.');
-  if (mode === 'production' && !SMTP_URL) throw new Error('Set SMTP_URL, or nobody can sign in.');
   return {
     mode,
     port: PORT,

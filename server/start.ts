@@ -11,6 +11,7 @@ import type { Services } from './http/context';
 import { expireSessions } from './http/session';
 import { every } from './jobs/every';
 import { sendDue } from './jobs/outbox';
+import type { MailPort } from './ports/mail';
 import { openPipeline } from './telemetry/pipeline';
 
 export interface Running {
@@ -25,7 +26,7 @@ const MINUTE = 60_000;
 export async function start(config: Config, root: string, now = () => Date.now()): Promise<Running> {
   const services = openServices(config, root, now);
   const { db, log, system, pipeline } = services;
-  const mail = config.smtpUrl ? smtpMail(config.smtpUrl, config.mailFrom) : localMail(db, config.mailFrom, now);
+  const mail = mailOf(services);
   const app = buildApp(services, path.join(root, 'dist/client'));
   const server = app.listen(config.port, config.host);
   await new Promise<void>((resolve, reject) => server.once('listening', resolve).once('error', reject));
@@ -51,6 +52,14 @@ export async function start(config: Config, root: string, now = () => Date.now()
       db.$client.close();
     },
   };
+}
+
+/** Without SMTP in production nothing is sent: mail waits in the outbox, and the log says so. */
+function mailOf({ config, db, log, now }: Services): MailPort {
+  if (config.smtpUrl) return smtpMail(config.smtpUrl, config.mailFrom);
+  if (config.mode !== 'production') return localMail(db, config.mailFrom, now);
+  log.warn('SMTP_URL is not set: nobody can sign in until it is');
+  return { send: () => Promise.reject(new Error('SMTP_URL is not set')) };
 }
 
 /** Everything but the network, for commands that need the data alone too. */

@@ -47,17 +47,17 @@ const CARRY_READINGS = 6;
 
 /**
  * Distances by reading and probe with spikes out and short gaps carried over; null where a probe is dead.
- * Hampel's rule per probe over three readings on either side. At the young end, where fewer are known, a jump that
- * several probes make together is believed at once; a lone probe's waits for a second reading that says the same.
+ * Hampel's rule per probe over three readings on either side. At the young end, where fewer are known, jumps
+ * of several probes at once are believed at once, up or down; a lone probe's waits for a second reading that says the same.
  */
 export function cleanDistances(readings: Reading[], probes: number): (number | null)[][] {
   const raw = Array.from({ length: probes }, (_, p) => readings.map(({ distancesIn }) => distancesIn[p] ?? null));
-  const odd = raw.map((series) => series.map((_, i) => oddness(series, i)));
+  const odd = raw.map((series) => series.map((_, i) => standsOut(series, i)));
   const young = readings.length - HALF_WINDOW;
   const carried = raw.map((series, p) => {
     const believed = (value: number | null, i: number) => {
-      const sign = odd[p]?.[i] ?? 0;
-      return sign === 0 || (i >= young && (odd.filter((signs) => signs[i] === sign).length > 1 || isConfirmed(series, i, value)));
+      if (!odd[p]?.[i]) return true;
+      return i >= young && (odd.filter((flags) => flags[i]).length > 1 || isConfirmed(series, i, value));
     };
     return carryOver(series.map((value, i) => (believed(value, i) ? value : null)));
   });
@@ -70,23 +70,21 @@ function isConfirmed(series: (number | null)[], i: number, value: number | null)
   return value !== null && next !== undefined && next !== null && Math.abs(next - value) <= LEAST_SPIKE_IN;
 }
 
-/** 1 or -1 where a value stands out from its neighbours above or below, else 0. */
-function oddness(series: (number | null)[], i: number): -1 | 0 | 1 {
+/** Hampel's rule: far from the median of its neighbours, by their own spread. */
+function standsOut(series: (number | null)[], i: number): boolean {
   const value = series[i];
-  if (value === null || value === undefined) return 0;
+  if (value === null || value === undefined) return false;
   const around: number[] = [];
   for (let j = Math.max(0, i - HALF_WINDOW); j <= i + HALF_WINDOW && j < series.length; j += 1) {
     const one = series[j];
     if (one !== null && one !== undefined) around.push(one);
   }
   // Most of the time nothing moves, and sorting is what this costs.
-  if (around.length < 3 || Math.max(...around) - Math.min(...around) <= LEAST_SPIKE_IN) return 0;
+  if (around.length < 3 || Math.max(...around) - Math.min(...around) <= LEAST_SPIKE_IN) return false;
   const middle = median(around);
-  const off = value - middle;
-  if (Math.abs(off) <= LEAST_SPIKE_IN) return 0;
-  const spread = MAD_TO_SD * median(around.map((one) => Math.abs(one - middle)));
-  if (Math.abs(off) <= HAMPEL_SD * spread) return 0;
-  return off > 0 ? 1 : -1;
+  const off = Math.abs(value - middle);
+  if (off <= LEAST_SPIKE_IN) return false;
+  return off > HAMPEL_SD * MAD_TO_SD * median(around.map((one) => Math.abs(one - middle)));
 }
 
 function carryOver(series: (number | null)[]): (number | null)[] {

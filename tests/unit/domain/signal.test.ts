@@ -24,6 +24,11 @@ describe('spikes', () => {
     expect(probe([20, 20, 20, 20, 6, 6, 6])).toEqual([20, 20, 20, 20, 6, 6, 6]);
   });
 
+  test('several probes that jump at once are believed at once, whichever way', () => {
+    const readings = [20, 20, 20, 20].map((value, i) => reading(i, [value, value + 1]));
+    expect(cleanDistances([...readings, reading(4, [8, 35])], 2).at(-1)).toEqual([8, 35]);
+  });
+
   test('several probes that rise together are believed at once', () => {
     const readings = [20, 20, 20, 20].map((value, i) => reading(i, [value, value + 1]));
     const clean = cleanDistances([...readings, reading(4, [5, 6])], 2);
