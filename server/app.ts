@@ -2,6 +2,7 @@ import compression from 'compression';
 import express, { type Express } from 'express';
 import helmet from 'helmet';
 import { pinoHttp } from 'pino-http';
+import { auditRoutes } from './features/audit/routes';
 import { authRoutes } from './features/auth/routes';
 import { magicLink } from './features/auth/magic-link';
 import { deliveriesRoutes } from './features/deliveries/routes';
@@ -9,6 +10,7 @@ import { devRoutes, hasDevDoors } from './features/dev/routes';
 import { freezersRoutes } from './features/freezers/routes';
 import { meRoutes } from './features/me/routes';
 import { requestsRoutes } from './features/requests/routes';
+import { sensorsRoutes } from './features/sensors/routes';
 import { storesRoutes } from './features/stores/routes';
 import { systemRoutes } from './features/system/routes';
 import { telemetryRoutes } from './features/telemetry/routes';
@@ -30,6 +32,8 @@ export const routesOf = (services: Services): Route[] => [
   ...freezersRoutes,
   ...deliveriesRoutes,
   ...requestsRoutes,
+  ...sensorsRoutes,
+  ...auditRoutes,
   ...(hasDevDoors(services.config.mode) ? devRoutes : []),
 ];
 

@@ -53,6 +53,16 @@ export function readConfig(mode: Mode, env: NodeJS.ProcessEnv): Config {
   };
 }
 
+/** For the commands: an environment that cannot be used ends them with words, not with a stack. */
+export function configOrLeave(mode: Mode): Config {
+  try {
+    return readConfig(mode, process.env);
+  } catch (error) {
+    console.error(error instanceof Error ? error.message : error);
+    process.exit(1);
+  }
+}
+
 function strong(secret: string | undefined): string {
   const enough = secret !== undefined && secret.length >= 32 && new Set(secret).size >= 12;
   if (!enough) throw new Error('Set SESSION_SECRET to at least 32 random characters, for example from: openssl rand -base64 48');

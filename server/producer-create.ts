@@ -1,7 +1,7 @@
 import path from 'node:path';
 import { parseArgs } from 'node:util';
 import * as z from 'zod/mini';
-import { readConfig } from './config';
+import { configOrLeave } from './config';
 import { email } from './contract/common';
 import { languages, reservedSlugs } from './contract/words';
 import { createProducer } from './features/producers/create';
@@ -47,7 +47,7 @@ if (!parsed.success) {
 }
 
 const root = path.resolve(import.meta.dirname, '../..');
-const services = openServices(readConfig('development', process.env), root);
+const services = openServices(configOrLeave('development'), root);
 const made = createProducer(services, parsed.data);
 services.db.$client.close();
 if (!made) {

@@ -1,3 +1,4 @@
+import { randomBytes } from 'node:crypto';
 import path from 'node:path';
 import { pino } from 'pino';
 import { v7 as uuidv7 } from 'uuid';
@@ -69,9 +70,10 @@ export function openServices(config: Config, root: string, now = () => Date.now(
   migrateDatabase(db, path.join(root, 'drizzle'));
   const system = systemDb(db);
   const newId = () => uuidv7();
+  const newSecret = () => randomBytes(32).toString('base64url');
   const pipeline = openPipeline(db, { now, newId, nextSensorNo: system.nextSensorNo });
   const storage = localStorage(path.join(config.dataDir, 'photos'));
-  return { config, db, system, storage, pipeline, log, now, newId, patience: 1 };
+  return { config, db, system, storage, pipeline, log, now, newId, newSecret, patience: 1 };
 }
 
 /** Stops once on the first signal and leaves at once on the second. */

@@ -14,4 +14,7 @@ export const paths = {
   askForIce: (producer: string, storeId: string) => `/${producer}/stores/${storeId}/ask-for-ice`,
   requests: (producer: string, query = '') => `/${producer}/requests${query}`,
   request: (producer: string, requestId: string, query = '') => `/${producer}/requests/${requestId}${query}`,
+  sensors: (producer: string) => `/${producer}/sensors`,
+  quarantinedReadings: (producer: string) => `/${producer}/sensors/readings`,
+  telemetryKeys: (producer: string) => `/${producer}/sensors/keys`,
 };

@@ -1,5 +1,6 @@
 import type { RouteObject } from 'react-router-dom';
 import { requestRoutes } from './features/requests/routes';
+import { sensorRoutes } from './features/sensors/routes';
 import { storeRoutes } from './features/stores/routes';
 import { Failure, FailurePage, NotFound } from './layouts/failure';
 import { FirstLook } from './layouts/first-look';
@@ -25,6 +26,7 @@ const producerRoutes: RouteObject[] = [
   { index: true, loader: landAtProducer },
   { path: 'stores', lazy: async () => (await import('./features/stores/stores-list')).storesList },
   ...requestRoutes,
+  ...sensorRoutes,
   ...storeRoutes,
 ];
 

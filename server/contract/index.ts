@@ -1,7 +1,9 @@
+import * as audit from './audit';
 import * as auth from './auth';
 import * as deliveries from './deliveries';
 import * as freezers from './freezers';
 import * as requests from './requests';
+import * as sensors from './sensors';
 import * as stores from './stores';
 import * as system from './system';
 import * as telemetry from './telemetry';
@@ -33,6 +35,14 @@ export const api = {
     readPhoto: requests.readPhoto,
     assignees: requests.listAssignees,
   },
+  sensors: {
+    listKeys: sensors.listKeys,
+    createKey: sensors.createKey,
+    revokeKey: sensors.revokeKey,
+    listUnclaimed: sensors.listUnclaimed,
+    listQuarantined: sensors.listQuarantined,
+  },
+  audit: { list: audit.listAudit },
   system: { health: system.health, openapi: system.openapi },
   dev: {
     mail: system.devMail,

@@ -1,4 +1,4 @@
-import { and, eq, gt, isNull, lt, sql } from 'drizzle-orm';
+import { and, eq, gt, isNull, lt, or, sql } from 'drizzle-orm';
 import type { Viewer } from '../contract/ability';
 import type { Language } from '../contract/words';
 import type { Database } from './open';
@@ -42,13 +42,13 @@ export function systemDb(db: Database) {
       storeIds: scopeOf(db, membership, now),
     }),
 
-    /** The producer whose telemetry key this is, or nothing. */
-    producerOfKey: (keyHash: string) =>
+    /** The producer whose telemetry key this is, or nothing once it has ended. */
+    producerOfKey: (keyHash: string, now: number) =>
       acrossProducers('a key says which producer is speaking', () =>
         db
           .select({ id: telemetryKeys.id, producerId: telemetryKeys.producerId, lastUsedAt: telemetryKeys.lastUsedAt })
           .from(telemetryKeys)
-          .where(and(eq(telemetryKeys.keyHash, keyHash), isNull(telemetryKeys.revokedAt)))
+          .where(and(eq(telemetryKeys.keyHash, keyHash), or(isNull(telemetryKeys.revokedAt), gt(telemetryKeys.revokedAt, now))))
           .get(),
       ),
 

@@ -1,5 +1,5 @@
 import path from 'node:path';
-import { readConfig } from '../config';
+import { configOrLeave } from '../config';
 import { roles } from '../contract/words';
 import { demoPeople } from '../features/dev/demo-people';
 import type { Services } from '../http/context';
@@ -9,7 +9,7 @@ import { catchUp, play } from './play';
 import { openWorld, type Played } from './world';
 
 /** `npm run demo`: the portal with the invented world in it, which goes on living unless `--no-play` is given. */
-const running = await start(readConfig('demo', process.env), path.resolve(import.meta.dirname, '../..'));
+const running = await start(configOrLeave('demo'), path.resolve(import.meta.dirname, '../..'));
 const { services } = running;
 const local = `http://${services.config.host}:${running.port}`;
 

@@ -7,6 +7,7 @@ import { createDemoProducer, historyDays } from './create';
 import { demoProducers, type DemoProducer } from './data/producers';
 import { historyWriter, setNextTrucks, writeDeliveries } from './history';
 import { createRequests, keepPictures } from './requests';
+import { createStrays } from './strays';
 import { keep, kept } from './kept';
 import { fleetOf, live, newMemory, storesOf, type FleetFreezer, type Memory } from './simulation';
 import { noTroubles, troublesAt } from './troubles';
@@ -66,6 +67,7 @@ export async function makeProducer(services: Services, demo: DemoProducer, progr
     progress(`${fleet.length} freezers live through ${historyDays} days`);
     const memory = liveThrough(services, demo, scoped, fleet);
     createRequests(services, scoped, demo.slug, pictures);
+    createStrays(services, demo, producerId);
     return { demo, key: makeKey(services, producerId), scoped, fleet, memory };
   })();
 }
@@ -89,5 +91,5 @@ function liveThrough({ db, newId, now }: Services, demo: DemoProducer, scoped: P
 function makeKey(services: Services, producerId: string): string {
   const at = services.now();
   const ability = abilityFor({ personId: '', membershipId: '', role: 'producer-admin', side: 'producer', storeIds: [], grants: [] });
-  return runAction(services, { producerId, id: 'operator', ability }, 'create-telemetry-key', at, (tx) => newTelemetryKey(tx, services.newId(), 'demo sensors', at));
+  return runAction(services, { producerId, id: 'operator', ability }, 'create-telemetry-key', at, (tx) => newTelemetryKey(tx, { id: services.newId(), key: services.newSecret(), name: 'demo sensors', now: at }));
 }

@@ -16,6 +16,8 @@ export interface Services {
   log: Logger;
   now: () => number;
   newId: () => string;
+  /** 32 random bytes as text. */
+  newSecret: () => string;
   /** Multiplies the limits on how often something may be asked; tests raise it. */
   patience: number;
 }
@@ -37,6 +39,7 @@ export interface ProducerContext {
   producer: Pick<Producer, 'slug' | 'name' | 'timeZone' | 'language' | 'urgentPhone'>;
   now: number;
   newId: () => string;
+  newSecret: () => string;
   storage: Storage;
   baseUrl: string;
   /** The only door to writing. */

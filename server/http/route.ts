@@ -68,7 +68,7 @@ function contextFor(services: Services, { access }: Endpoint, req: Request): Pro
 
 /** The session proves a membership of the producer in the path; a stranger cannot tell a producer from nothing. */
 function producerContext(services: Services, req: Request): ProducerContext {
-  const { system, newId, storage, config, db } = services;
+  const { system, newId, newSecret, storage, config, db } = services;
   const { personId } = signedIn(services, req);
   const found = system.membershipsOf(personId).find(({ producer }) => producer.slug === req.params.producer);
   if (!found) throw problem('not-found');
@@ -85,6 +85,7 @@ function producerContext(services: Services, req: Request): ProducerContext {
     producer: { slug, name, timeZone, language, urgentPhone },
     now,
     newId,
+    newSecret,
     storage,
     baseUrl: config.baseUrl,
     act: (act, work) => runAction(services, actor, act, now, work),

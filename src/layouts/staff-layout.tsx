@@ -1,8 +1,10 @@
 import type { ReactNode } from 'react';
-import { MessagesSquare, Store, type LucideIcon } from 'lucide-react';
+import { MessagesSquare, Radio, Store, type LucideIcon } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import { Link, NavLink } from 'react-router-dom';
+import type { Subject } from '../../server/contract/ability';
 import type { Membership } from '../../server/contract/auth';
+import { useAbility } from '../lib/me';
 import { paths } from '../paths';
 import { KeptLanguageSwitch } from './kept-language-switch';
 import { landingOf } from './landing';
@@ -41,19 +43,30 @@ export function StaffLayout({ member, children }: Props) {
   );
 }
 
-const sections: { key: 'stores' | 'service'; Icon: LucideIcon; to: (slug: string) => string }[] = [
+interface Section {
+  key: 'stores' | 'service' | 'sensors';
+  Icon: LucideIcon;
+  to: (slug: string) => string;
+  /** Only for those who may read one of these. */
+  reads?: Subject[];
+}
+
+const sections: Section[] = [
   { key: 'stores', Icon: Store, to: (slug) => paths.stores(slug) },
   { key: 'service', Icon: MessagesSquare, to: (slug) => paths.requests(slug) },
+  { key: 'sensors', Icon: Radio, to: (slug) => paths.sensors(slug), reads: ['Sensor', 'TelemetryKey'] },
 ];
 
 function Sections({ slug }: { slug: string }) {
   const { t } = useTranslation();
+  const ability = useAbility();
+  const shown = sections.filter(({ reads }) => !reads || reads.some((subject) => ability.can('read', subject)));
   return (
     <nav
       aria-label={t('nav.label')}
       className="fixed inset-x-0 bottom-0 z-30 grid auto-cols-fr grid-flow-col border-t border-rule bg-surface pb-[env(safe-area-inset-bottom)] lg:static lg:flex lg:flex-col lg:gap-0.5 lg:border-0 lg:pb-0"
     >
-      {sections.map(({ key, Icon, to }) => (
+      {shown.map(({ key, Icon, to }) => (
         <NavLink
           key={key}
           to={to(slug)}

@@ -18,6 +18,11 @@ const questions = [
   `${at}/requests?state=open&store=${id('lantern')}`,
   `${at}/requests/${id('cold request')}`,
   `${at}/assignees`,
+  `${at}/telemetry-keys`,
+  `${at}/audit`,
+  `${at}/audit?subject=Request&from=2026-11-01&to=2026-12-01`,
+  `${at}/unclaimed-sensors`,
+  `${at}/quarantined-readings`,
   '/api/me',
   '/api/me/sessions',
 ];

@@ -35,6 +35,9 @@ const pages: [name: string, person: Member | null, path: string][] = [
   ['a request for its store', manager, `${at}/requests/${id('cold request')}`],
   ['requests of a technician', technician, `${at}/requests?assignee=me`],
   ['nothing asked', admin, `${at}/requests?state=cancelled`],
+  ['unclaimed sensors', admin, `${at}/sensors`],
+  ['readings not believed', technician, `${at}/sensors/readings`],
+  ['telemetry keys', admin, `${at}/sensors/keys`],
   ['profile', manager, '/profile'],
 ];
 

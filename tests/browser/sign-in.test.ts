@@ -24,9 +24,9 @@ interface LocalMail {
 async function ask({ page }: Visit, email: string, from = '/'): Promise<{ link: string; code: string }> {
   const before = await mailsTo(email);
   await page.goto(from);
-  await page.getByLabel('E-mail address').fill(email);
-  await page.getByRole('button', { name: 'Send me the mail' }).click();
-  await page.getByRole('heading', { name: 'Check your mail' }).waitFor();
+  await page.getByLabel('Email address').fill(email);
+  await page.getByRole('button', { name: 'Email me a link' }).click();
+  await page.getByRole('heading', { name: 'Check your email' }).waitFor();
   await expect.poll(async () => (await mailsTo(email)).length, { timeout: 10_000 }).toBe(before.length + 1);
   const [mail] = await mailsTo(email);
   return { link: mail?.links[0] ?? '', code: /\d{6}/.exec(mail?.subject ?? '')?.[0] ?? '' };

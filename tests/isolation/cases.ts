@@ -111,12 +111,24 @@ export const cases: Case[] = [
   },
   { endpoint: api.requests.assignees, allowed: ['rep', 'storeRep', 'agent', 'dispatcher', 'technician', 'admin'] },
 
+  { endpoint: api.sensors.listKeys, allowed: ['admin'] },
+  {
+    endpoint: api.sensors.createKey,
+    named: { replaces: thing('key') },
+    body: ({ replaces }) => ({ name: 'second gateway', replaces }),
+    allowed: ['admin'],
+  },
+  { endpoint: api.sensors.revokeKey, path: { keyId: thing('key') }, allowed: ['admin'] },
+  { endpoint: api.sensors.listUnclaimed, allowed: ['agent', 'dispatcher', 'technician', 'admin'] },
+  { endpoint: api.sensors.listQuarantined, allowed: ['agent', 'dispatcher', 'technician', 'admin'] },
+
+  { endpoint: api.audit.list, query: { actor: thing('manager') }, allowed: ['admin'] },
+
   { endpoint: api.me.read, status: 200 },
   { endpoint: api.me.update, body: () => ({ language: 'es' }), status: 204 },
   { endpoint: api.me.sessions, status: 200 },
   { endpoint: api.me.endSession, path: { handle: { own: 'nobodys-handle' } }, status: 404 },
   { endpoint: api.auth.signOut, status: 204 },
-  { endpoint: api.auth.readSession, status: 200 },
   { endpoint: api.auth.readSession, status: 200 },
   { endpoint: api.auth.requestLink, body: () => ({ email: alderPeople.manager.email }), status: 202 },
   { endpoint: api.auth.signIn, body: () => ({ token: 'guessed' }), status: 410 },

@@ -195,8 +195,8 @@ describe('doors', () => {
       ...services,
       system: {
         ...services.system,
-        producerOfKey: (keyHash) => {
-          const found = services.system.producerOfKey(keyHash);
+        producerOfKey: (keyHash, now) => {
+          const found = services.system.producerOfKey(keyHash, now);
           const other = services.db.select().from(producers).where(eq(producers.slug, 'twin-ice')).get();
           return found && other && { ...found, producerId: other.id };
         },

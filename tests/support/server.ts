@@ -57,6 +57,7 @@ export async function testApp(world: World = 'alder-and-birch', change: (service
     log: pino({ level: 'info' }, { write: (line: string) => void log.push(line) }),
     now,
     newId,
+    newSecret: () => hash(newId()),
     patience: 1e6,
   });
   const app = buildApp(services, path.join(root, 'tests/.out/no-client'));

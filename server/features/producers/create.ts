@@ -38,7 +38,7 @@ export function createProducer(services: Services, wanted: NewProducer): MadePro
     const telemetryKey = runAction(services, { producerId, id: 'operator', ability: abilityFor(viewer) }, 'create-producer', at, (tx) => {
       tx.authorise('create', 'Settings', {});
       tx.audit('Settings', producerId, { slug });
-      return newTelemetryKey(tx, newId(), 'first source', at);
+      return newTelemetryKey(tx, { id: newId(), key: services.newSecret(), name: 'first source', now: at });
     });
     return { producerId, telemetryKey };
   })();

@@ -41,7 +41,7 @@ const MINUTE = 60_000;
 function requireKey({ system, now }: Services): RequestHandler {
   return (req, res, next) => {
     const given = KEY.exec(req.get('authorization') ?? '')?.[1];
-    const found = given ? system.producerOfKey(hash(given)) : undefined;
+    const found = given ? system.producerOfKey(hash(given), now()) : undefined;
     if (!found) return next(problem('bad-key'));
     if (now() - (found.lastUsedAt ?? 0) > MINUTE) system.keyUsed(found.id, now());
     res.locals.telemetryProducerId = found.producerId;

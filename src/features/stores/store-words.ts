@@ -29,7 +29,9 @@ export function storeWords(t: TFunction<'store'>, format: Format, now: number) {
     const part = format.partOfDay(at);
     const shift = part === 'night' ? nightHours * hour : 0;
     const day = dayOf(at - shift, zone);
-    return t(`when.${part}`, { day: weekday(day), context: day === dayOf(now - shift, zone) ? 'today' : undefined });
+    const said = dayOf(now - shift, zone);
+    const context = day === said ? 'today' : part === 'night' && day === addDays(said, -1) ? 'yesterday' : undefined;
+    return t(`when.${part}`, { day: weekday(day), context });
   };
 
   return {

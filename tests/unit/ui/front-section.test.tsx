@@ -34,7 +34,7 @@ test('the text alternative says what the drawing shows', async () => {
   const { container } = await draw('en');
   expect(container.querySelector('figcaption')?.textContent).toBe(
     'Front view, from left to right. 7 lb: 88 bags, stacked 26.5 of 36 inches high. ' +
-      '20 lb: about 14 bags, stacked 11 of 36 inches high. This is low. ' +
+      '20 lb: about 14 bags, stacked 11 of 36 inches high. Running low. ' +
       'Probe 1 of 2: 18.5 inches down to the bags. Probe 2 of 2: no signal. Air: 18 °F.',
   );
   expect(container.querySelector('svg')?.getAttribute('aria-hidden')).toBe('true');
