@@ -9,6 +9,7 @@ import { deliveriesRoutes } from './features/deliveries/routes';
 import { devRoutes, hasDevDoors } from './features/dev/routes';
 import { freezersRoutes } from './features/freezers/routes';
 import { meRoutes } from './features/me/routes';
+import { peopleRoutes } from './features/people/routes';
 import { requestsRoutes } from './features/requests/routes';
 import { sensorsRoutes } from './features/sensors/routes';
 import { storesRoutes } from './features/stores/routes';
@@ -34,6 +35,7 @@ export const routesOf = (services: Services): Route[] => [
   ...requestsRoutes,
   ...sensorsRoutes,
   ...auditRoutes,
+  ...peopleRoutes,
   ...(hasDevDoors(services.config.mode) ? devRoutes : []),
 ];
 

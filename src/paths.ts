@@ -16,5 +16,6 @@ export const paths = {
   request: (producer: string, requestId: string, query = '') => `/${producer}/requests/${requestId}${query}`,
   sensors: (producer: string) => `/${producer}/sensors`,
   quarantinedReadings: (producer: string) => `/${producer}/sensors/readings`,
+  changes: (producer: string) => `/${producer}/changes`,
   telemetryKeys: (producer: string) => `/${producer}/sensors/keys`,
 };

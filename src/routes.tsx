@@ -28,6 +28,7 @@ const producerRoutes: RouteObject[] = [
   ...requestRoutes,
   ...sensorRoutes,
   ...storeRoutes,
+  { path: 'changes', lazy: async () => (await import('./features/audit/changes')).changesPage },
 ];
 
 export const routes: RouteObject[] = [

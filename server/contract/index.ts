@@ -2,6 +2,7 @@ import * as audit from './audit';
 import * as auth from './auth';
 import * as deliveries from './deliveries';
 import * as freezers from './freezers';
+import * as people from './people';
 import * as requests from './requests';
 import * as sensors from './sensors';
 import * as stores from './stores';
@@ -41,6 +42,13 @@ export const api = {
     revokeKey: sensors.revokeKey,
     listUnclaimed: sensors.listUnclaimed,
     listQuarantined: sensors.listQuarantined,
+  },
+  people: {
+    list: people.listPeople,
+    invite: people.invitePerson,
+    change: people.changePerson,
+    inviteAgain: people.inviteAgain,
+    places: people.listPlaces,
   },
   audit: { list: audit.listAudit },
   system: { health: system.health, openapi: system.openapi },

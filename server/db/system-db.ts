@@ -94,6 +94,12 @@ export function systemDb(db: Database) {
         .returning({ personId: signInLinks.personId, next: signInLinks.next })
         .get(),
 
+    /** The person of this address, made where there is none; an address belongs to one person in all the installation. */
+    personOf: (wanted: { id: string; email: string; name: string; language: Language }, now: number): string => {
+      db.insert(people).values({ ...wanted, createdAt: now }).onConflictDoNothing({ target: people.email }).run();
+      return db.select({ id: people.id }).from(people).where(eq(people.email, wanted.email)).get()?.id ?? wanted.id;
+    },
+
     expireLinks: (before: number): number => db.delete(signInLinks).where(lt(signInLinks.expiresAt, before)).run().changes,
 
     setPerson: (id: string, patch: { language?: Language; name?: string }): void => {

@@ -1,5 +1,6 @@
 import type { Logger } from 'pino';
 import type { Ability, Action, Subject, Viewer } from '../contract/ability';
+import type { Language } from '../contract/words';
 import type { Config } from '../config';
 import type { Database, Producer, ProducerDb, SystemDb } from '../db';
 import type { MailMessage } from '../features/mail/compose';
@@ -29,6 +30,8 @@ export interface ActionTx {
   /** What changed, for the audit trail; ids and plain values only, no names. */
   audit: (type: Subject, id: string, changes: Record<string, unknown>) => void;
   mail: (message: MailMessage) => void;
+  /** The person of an address, made where there is none. */
+  personOf: (wanted: { email: string; name: string; language: Language }) => string;
 }
 
 /** What a handler of a producer's route holds: neither the raw database nor the producer's id. */

@@ -34,6 +34,7 @@ export function runAction<T>(services: Services, actor: Actor, name: string, now
       const payload = JSON.stringify(composeMail(message, services.config.baseUrl));
       db.insert(outbox).values({ id: newId(), kind: 'mail', payload, dueAt: now, createdAt: now }).run();
     },
+    personOf: (wanted) => services.system.personOf({ id: newId(), ...wanted }, now),
   };
   return db.$client.transaction(() => {
     const result = work(tx);

@@ -19,6 +19,8 @@ const questions = [
   `${at}/requests/${id('cold request')}`,
   `${at}/assignees`,
   `${at}/telemetry-keys`,
+  `${at}/people?q=a&role=store-manager`,
+  `${at}/places`,
   `${at}/audit`,
   `${at}/audit?subject=Request&from=2026-11-01&to=2026-12-01`,
   `${at}/unclaimed-sensors`,

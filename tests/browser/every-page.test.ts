@@ -1,4 +1,6 @@
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import en from '../../locales/en/problems.json';
+import es from '../../locales/es/problems.json';
 import { alder, alderPeople, type Member } from '../cast';
 import { idOf } from '../factories';
 import { enterAs, faultsOf, openPortal, overflow, settled, type Portal } from './portal';
@@ -38,6 +40,7 @@ const pages: [name: string, person: Member | null, path: string][] = [
   ['unclaimed sensors', admin, `${at}/sensors`],
   ['readings not believed', technician, `${at}/sensors/readings`],
   ['telemetry keys', admin, `${at}/sensors/keys`],
+  ['history of changes', admin, `${at}/changes`],
   ['profile', manager, '/profile'],
 ];
 
@@ -59,7 +62,9 @@ describe.each(['en', 'es'] as const)('in %s', (language) => {
     await page.goto(path);
     await settled(page);
     expect(await page.locator('html').getAttribute('lang')).toBe(language);
-    expect(await page.getByRole('heading', { level: 1 }).count()).toBe(1);
+    const title = await page.getByRole('heading', { level: 1 }).allInnerTexts();
+    expect(title).toHaveLength(1);
+    expect([en['not-found'].title, es['not-found'].title]).not.toContain(title[0]);
     for (const { width, dark } of looks) {
       await page.setViewportSize({ width, height: 900 });
       await page.emulateMedia({ colorScheme: dark ? 'dark' : 'light' });

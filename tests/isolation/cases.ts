@@ -24,6 +24,8 @@ export interface Case {
   allowed?: readonly AlderMember[];
   /** For `may`: who may do so elsewhere, so that here there is nothing for them. */
   hidden?: readonly AlderMember[];
+  /** An address outside the cast that the call itself names and may write to. */
+  invites?: string;
   /** For the other kinds: what anybody let in is answered. */
   status?: number;
 }
@@ -122,6 +124,30 @@ export const cases: Case[] = [
   { endpoint: api.sensors.listUnclaimed, allowed: ['agent', 'dispatcher', 'technician', 'admin'] },
   { endpoint: api.sensors.listQuarantined, allowed: ['agent', 'dispatcher', 'technician', 'admin'] },
 
+  { endpoint: api.people.list, allowed: ['admin'] },
+  {
+    endpoint: api.people.invite,
+    named: { id: thing('lantern') },
+    invites: 'new@lantern.example',
+    body: ({ id }) => ({ email: 'new@lantern.example', name: 'New', language: 'en', role: 'store-manager', scopes: [{ kind: 'store', id }] }),
+    allowed: ['admin'],
+  },
+  {
+    endpoint: api.people.change,
+    path: { memberId: thing('manager') },
+    named: { id: thing('north') },
+    body: ({ id }) => ({ role: 'district-rep', scopes: [{ kind: 'district', id }] }),
+    allowed: ['admin'],
+  },
+  {
+    endpoint: api.people.change,
+    path: { memberId: thing('technician') },
+    named: { handOverTo: thing('agent') },
+    body: ({ handOverTo }) => ({ active: false, handOverTo }),
+    allowed: ['admin'],
+  },
+  { endpoint: api.people.inviteAgain, path: { memberId: thing('manager') }, allowed: ['admin'] },
+  { endpoint: api.people.places, allowed: ['admin'] },
   { endpoint: api.audit.list, query: { actor: thing('manager') }, allowed: ['admin'] },
 
   { endpoint: api.me.read, status: 200 },

@@ -64,7 +64,7 @@ function asking(test: TestApp, one: Case, cookie: string | null, hidden: string[
       const letters = one.endpoint.access.kind === 'public' ? [] : mails.map((mail) => JSON.stringify(mail));
       const said = [answer.body, answer.headers, ...test.log, ...letters].join('\n');
       if (one.endpoint.access.kind !== 'dev') for (const word of hidden) if (said.includes(word)) findings.push(`is told ${word} with ${told}`);
-      const strayed = mails.filter(({ to }) => !alderAddresses.has(to));
+      const strayed = mails.filter(({ to }) => !alderAddresses.has(to) && to !== one.invites);
       if (strayed.length > 0) findings.push(`writes to ${strayed.map(({ to }) => to).join(', ')} with ${told}`);
       const { alders, others } = traces(test);
       if (others.length > 0) findings.push(`writes for another producer (${others.join(', ')}) with ${told}`);

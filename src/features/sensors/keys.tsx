@@ -10,7 +10,7 @@ import { useMembership } from '../../lib/me';
 import { Button } from '../../ui/button';
 import { EmptyState } from '../../ui/states';
 import { useNow } from '../stores/use-now';
-import { CardTable } from './card-table';
+import { CardTable } from '../../table/card-table';
 import { EndKey } from './end-key';
 import { KeyActs, type KeyAct } from './key-acts';
 import { KeyState } from './key-state';

@@ -8,7 +8,7 @@ import { useMembership } from '../../lib/me';
 import { Pager } from '../../table/pager';
 import { EmptyState } from '../../ui/states';
 import { useNow } from '../stores/use-now';
-import { CardTable } from './card-table';
+import { CardTable } from '../../table/card-table';
 import { Moment } from './moment';
 import { SensorsFrame } from './sensors-frame';
 

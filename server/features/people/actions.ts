@@ -1,0 +1,109 @@
+import type { Body } from '../../contract/endpoint';
+import { scopedRoles, type changePerson as changeEndpoint, type invitePerson as inviteEndpoint, type MemberOf } from '../../contract/people';
+import { liveStates, type Role, type Side } from '../../contract/words';
+import { accounts, and, districts, eq, inArray, memberships, membershipScopes, requests, sql, stores, type ProducerDb } from '../../db';
+import { membersByRole, peopleView } from '../../db/views/people';
+import type { ActionTx, ProducerContext } from '../../http/context';
+import { problem } from '../../http/problem';
+
+type Scopes = Body<typeof inviteEndpoint>['scopes'];
+
+/** Adds somebody to the producer and writes to them. Answers the membership's id. */
+export function invitePerson(ctx: ProducerContext, body: Body<typeof inviteEndpoint>): string {
+  const { email, name, language, role, scopes } = body;
+  return ctx.act('invite-person', (tx) => {
+    tx.authorise('create', 'Person', {});
+    refuseUnscoped(role, scopes);
+    const personId = tx.personOf({ email, name, language });
+    const known = tx.db.select({ id: memberships.id }).from(memberships).where(eq(memberships.personId, personId)).get();
+    if (known) throw problem('already-member');
+    const id = ctx.newId();
+    tx.db.insert(memberships, { id, personId, role, side: sideOf(role, body.side), createdAt: ctx.now });
+    assign(ctx, tx, id, role, scopes);
+    tx.audit('Person', id, { role, scopes });
+    invite(ctx, tx, id);
+    return id;
+  });
+}
+
+export function inviteAgain(ctx: ProducerContext, id: string): void {
+  ctx.act('invite-again', (tx) => {
+    const member = memberOf(tx.db, id);
+    tx.authorise('update', 'Person', { id });
+    if (!member.active) throw problem('not-found');
+    invite(ctx, tx, id);
+    tx.audit('Person', id, { invited: true });
+  });
+}
+
+/** Changes what somebody may do here; it acts on their next request. The last admin stays one. */
+export function changePerson(ctx: ProducerContext, id: string, change: Body<typeof changeEndpoint>): void {
+  ctx.act('change-person', (tx) => {
+    const member = memberOf(tx.db, id);
+    tx.authorise('update', 'Person', { id });
+    const role = change.role ?? member.role;
+    const active = change.active ?? member.active;
+    const scopes = change.scopes ?? member.scopes.map(({ kind, id: place }) => ({ kind, id: place }));
+    if (member.role === 'producer-admin' && member.active && (role !== 'producer-admin' || !active)) refuseLastAdmin(tx.db);
+    refuseUnscoped(role, scopes);
+    tx.db.update(memberships, id, {
+      role,
+      side: sideOf(role, change.side ?? member.side),
+      deactivatedAt: active ? null : ctx.now,
+    });
+    tx.db.delete(membershipScopes, eq(membershipScopes.membershipId, id));
+    assign(ctx, tx, id, role, scopes);
+    if (!active && member.active) handOver(ctx, tx, id, change.handOverTo);
+    tx.audit('Person', id, { role, active, scopes, handOverTo: change.handOverTo });
+  });
+}
+
+export function memberOf(db: ProducerDb, id: string): MemberOf {
+  const [member] = peopleView(db, sql`m.id = ${id}`, 1);
+  if (!member) throw problem('not-found');
+  return member;
+}
+
+const isScoped = (role: Role): boolean => scopedRoles.some((scoped) => scoped === role);
+
+function refuseUnscoped(role: Role, scopes: Scopes): void {
+  if (isScoped(role) && scopes.length === 0) throw problem('scope-needed');
+}
+
+/** Only a district rep can be on either side. */
+const sideOf = (role: Role, asked: Side): Side => (role === 'store-manager' ? 'store' : role === 'district-rep' ? asked : 'producer');
+
+const places = { store: stores, district: districts, account: accounts };
+
+/** Others than managers and reps see everything, so nothing is assigned to them. */
+function assign({ newId }: ProducerContext, tx: ActionTx, membershipId: string, role: Role, scopes: Scopes): void {
+  if (!isScoped(role)) return;
+  for (const { kind, id } of scopes) {
+    if (!tx.db.find(places[kind], id)) throw problem('scope-unknown');
+    const place = { storeId: null, districtId: null, accountId: null, [`${kind}Id`]: id };
+    tx.db.insert(membershipScopes, { id: newId(), membershipId, ...place });
+  }
+}
+
+function refuseLastAdmin(db: ProducerDb): void {
+  if (membersByRole(db, ['producer-admin']).length < 2) throw problem('last-admin');
+}
+
+/** Live requests of somebody who leaves go to whoever is named, or back to nobody. */
+function handOver(ctx: ProducerContext, tx: ActionTx, from: string, to: string | null): void {
+  if (to && (to === from || !memberOf(tx.db, to).active)) throw problem('unknown-person');
+  const held = tx.db
+    .select({ id: requests.id, version: requests.version })
+    .from(requests)
+    .where(and(eq(requests.assigneeId, from), inArray(requests.state, [...liveStates])))
+    .all();
+  for (const { id, version } of held) {
+    tx.db.update(requests, id, { assigneeId: to, version: version + 1, changedAt: ctx.now });
+    tx.audit('Request', id, { assigneeId: to });
+  }
+}
+
+function invite({ producer }: ProducerContext, tx: ActionTx, id: string): void {
+  const { email, name, language } = memberOf(tx.db, id);
+  tx.mail({ template: 'invitation', to: email, language, params: { name, producer: producer.name }, path: '/sign-in' });
+}
