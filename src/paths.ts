@@ -16,6 +16,9 @@ export const paths = {
   request: (producer: string, requestId: string, query = '') => `/${producer}/requests/${requestId}${query}`,
   sensors: (producer: string) => `/${producer}/sensors`,
   quarantinedReadings: (producer: string) => `/${producer}/sensors/readings`,
+  people: (producer: string) => `/${producer}/people`,
+  invite: (producer: string) => `/${producer}/people/invite`,
+  person: (producer: string, memberId: string) => `/${producer}/people/${memberId}`,
   changes: (producer: string) => `/${producer}/changes`,
   telemetryKeys: (producer: string) => `/${producer}/sensors/keys`,
 };

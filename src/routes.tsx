@@ -1,4 +1,5 @@
 import type { RouteObject } from 'react-router-dom';
+import { peopleRoutes } from './features/people/routes';
 import { requestRoutes } from './features/requests/routes';
 import { sensorRoutes } from './features/sensors/routes';
 import { storeRoutes } from './features/stores/routes';
@@ -28,6 +29,7 @@ const producerRoutes: RouteObject[] = [
   ...requestRoutes,
   ...sensorRoutes,
   ...storeRoutes,
+  ...peopleRoutes,
   { path: 'changes', lazy: async () => (await import('./features/audit/changes')).changesPage },
 ];
 

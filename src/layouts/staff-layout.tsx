@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react';
-import { History, MessagesSquare, Radio, Store, type LucideIcon } from 'lucide-react';
+import { History, MessagesSquare, Radio, Store, Users, type LucideIcon } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
 import { Link, NavLink } from 'react-router-dom';
 import type { Subject } from '../../server/contract/ability';
@@ -44,7 +44,7 @@ export function StaffLayout({ member, children }: Props) {
 }
 
 interface Section {
-  key: 'stores' | 'service' | 'sensors' | 'changes';
+  key: 'stores' | 'service' | 'sensors' | 'people' | 'changes';
   Icon: LucideIcon;
   to: (slug: string) => string;
   /** Only for those who may read one of these. */
@@ -55,6 +55,7 @@ const sections: Section[] = [
   { key: 'stores', Icon: Store, to: (slug) => paths.stores(slug) },
   { key: 'service', Icon: MessagesSquare, to: (slug) => paths.requests(slug) },
   { key: 'sensors', Icon: Radio, to: (slug) => paths.sensors(slug), reads: ['Sensor', 'TelemetryKey'] },
+  { key: 'people', Icon: Users, to: (slug) => paths.people(slug), reads: ['Person'] },
   { key: 'changes', Icon: History, to: (slug) => paths.changes(slug), reads: ['Audit'] },
 ];
 

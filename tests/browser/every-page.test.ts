@@ -40,6 +40,8 @@ const pages: [name: string, person: Member | null, path: string][] = [
   ['unclaimed sensors', admin, `${at}/sensors`],
   ['readings not believed', technician, `${at}/sensors/readings`],
   ['telemetry keys', admin, `${at}/sensors/keys`],
+  ['people', admin, `${at}/people`],
+  ['invite somebody', admin, `${at}/people/invite`],
   ['history of changes', admin, `${at}/changes`],
   ['profile', manager, '/profile'],
 ];
