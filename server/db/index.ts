@@ -2,6 +2,7 @@
 export { and, asc, desc, eq, gt, gte, inArray, isNotNull, isNull, like, lt, lte, max, ne, or, sql, type SQL } from 'drizzle-orm';
 export * from './schema';
 export { allowed } from './allowed';
+export { contains } from './contains';
 export { migrateDatabase, openDatabase, type Connection, type Database } from './open';
 export { producerDb, type ProducerDb } from './producer-db';
 export { systemDb, type Person, type Producer, type SystemDb } from './system-db';

@@ -35,7 +35,7 @@ const UNDONE = /\bproducer_id["`\]]?\s*=\s*(?:\?|[@:$]\w+)\s+or\b/;
 const seen = new Set<string>();
 let across = 0;
 
-/** Lets `work` touch tables of every producer; the reason is for the reader. Only `system-db.ts` and start-up may. */
+/** Lets `work` touch tables of every producer; the reason is for the reader. Only `system-db.ts` and the demo's list of people do. */
 export function acrossProducers<T>(_reason: string, work: () => T): T {
   across += 1;
   try {

@@ -1,5 +1,4 @@
 import type { ReactNode } from 'react';
-import { Button } from './button';
 
 interface EmptyProps {
   title: string;
@@ -14,28 +13,5 @@ export const EmptyState = ({ title, children, action }: EmptyProps) => (
     <p className="text-lead font-semibold">{title}</p>
     {children && <div className="max-w-prose text-ink-2">{children}</div>}
     {action && <div className="mt-2">{action}</div>}
-  </div>
-);
-
-interface ErrorProps {
-  title: string;
-  detail?: string;
-  retry?: { label: string; busy?: boolean; onRetry: () => void };
-  children?: ReactNode;
-}
-
-/** It failed: what, and what can be done. */
-export const ErrorState = ({ title, detail, retry, children }: ErrorProps) => (
-  <div role="alert" className="grid justify-items-start gap-2 rounded-card border border-rust bg-rust-tint px-5 py-6">
-    <p className="text-lead font-semibold text-rust">{title}</p>
-    {detail && <p className="max-w-prose">{detail}</p>}
-    {children}
-    {retry && (
-      <div className="mt-2">
-        <Button variant="quiet" busy={retry.busy} onClick={retry.onRetry}>
-          {retry.label}
-        </Button>
-      </div>
-    )}
   </div>
 );

@@ -1,5 +1,5 @@
 import { api } from '../../contract';
-import { accounts, and, districts, isNull, sql } from '../../db';
+import { accounts, and, contains, districts, isNull, sql } from '../../db';
 import { peopleView } from '../../db/views/people';
 import { route } from '../../http/route';
 import { pageOf, readCursor } from '../cursor';
@@ -9,10 +9,9 @@ export const peopleRoutes = [
   route(api.people.list, ({ db }, { query }) => {
     const { limit = 50, role, q } = query;
     const cursor = readCursor(query.after, ['string', 'string']);
-    const pattern = q && `%${q.replace(/[\\%_]/g, (sign) => `\\${sign}`)}%`;
     const where = and(
       role ? sql`m.role = ${role}` : undefined,
-      pattern ? sql`(p.name like ${pattern} escape '\\' or p.email like ${pattern} escape '\\')` : undefined,
+      q ? contains(q, sql`p.name`, sql`p.email`) : undefined,
       cursor ? sql`(p.name, m.id) > (${cursor[0]}, ${cursor[1]})` : undefined,
     );
     const page = pageOf(peopleView(db, where ?? sql`1`, limit + 1), limit, ({ name, id }) => [name, id]);

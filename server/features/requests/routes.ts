@@ -2,7 +2,7 @@ import { row } from '../../contract/ability';
 import { api } from '../../contract';
 import type { Query } from '../../contract/endpoint';
 import type { Request } from '../../contract/requests';
-import { and, eq, isNull, requests, sql, stores, type SQL } from '../../db';
+import { and, contains, eq, isNull, requests, sql, stores, type SQL } from '../../db';
 import { membersByRole } from '../../db/views/people';
 import { readableRequests, requestsView, requestView } from '../../db/views/requests';
 import { live } from '../../db/views/stores';
@@ -97,6 +97,5 @@ function filters({ state = 'live', kind, assignee, store, q }: Query<typeof api.
 function matches(q: string): SQL {
   const number = /^(?:sr-?)?(\d{1,9})$/i.exec(q.trim())?.[1];
   if (number) return eq(requests.number, Number(number));
-  const pattern = `%${q.trim().replace(/[\\%_]/g, (sign) => `\\${sign}`)}%`;
-  return sql`(${stores.name} like ${pattern} escape '\\' or ${requests.words} like ${pattern} escape '\\')`;
+  return contains(q, stores.name, requests.words);
 }

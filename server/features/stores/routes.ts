@@ -1,7 +1,7 @@
 import { row, type Ability } from '../../contract/ability';
 import { api } from '../../contract';
 import type { Attention } from '../../contract/stores';
-import { allowed, and, gte, lt, nextTrucks, or, sql, stores, type SQL } from '../../db';
+import { allowed, and, contains, gte, lt, nextTrucks, sql, stores, type SQL } from '../../db';
 import { deliveriesOfStore, nextTruckOfStore } from '../../db/views/deliveries';
 import { freezersOfStore } from '../../db/views/freezers';
 import { readableRequests, recentRequestsOfStore } from '../../db/views/requests';
@@ -19,7 +19,7 @@ export const storesRoutes = [
     const where = and(
       allowed(ability, 'read', 'Store', { id: stores.id }),
       cursor ? sql`(${stores.name}, ${stores.id}) > (${cursor[0]}, ${cursor[1]})` : undefined,
-      query.q ? matches(query.q) : undefined,
+      query.q ? contains(query.q, stores.name, stores.street, stores.city) : undefined,
       query.truck ? truckIs(query.truck, now, producer.timeZone) : undefined,
       query.truck ? allowed(ability, 'read', 'NextTruck', { storeId: stores.id }) : undefined,
     );
@@ -40,12 +40,6 @@ export const storesRoutes = [
     };
   }),
 ];
-
-function matches(q: string): SQL | undefined {
-  const pattern = `%${q.replace(/[\\%_]/g, (sign) => `\\${sign}`)}%`;
-  const has = (column: typeof stores.name | typeof stores.street | typeof stores.city) => sql`${column} like ${pattern} escape '\\'`;
-  return or(has(stores.name), has(stores.street), has(stores.city));
-}
 
 function truckIs(when: 'today' | 'late' | 'none', now: number, timeZone: string): SQL {
   if (when === 'none') return noTruck;
