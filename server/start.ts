@@ -7,7 +7,7 @@ import { smtpMail } from './adapters/mail/real';
 import { localStorage } from './adapters/storage/local';
 import { buildApp } from './app';
 import type { Config } from './config';
-import { migrateDatabase, openDatabase, systemDb } from './db';
+import { fillFleetRows, migrateDatabase, openDatabase, producerDb, systemDb } from './db';
 import type { Services } from './http/context';
 import { expireSessions } from './http/session';
 import { every } from './jobs/every';
@@ -69,6 +69,7 @@ export function openServices(config: Config, root: string, now = () => Date.now(
   const db = openDatabase(path.join(config.dataDir, 'nilas.db'));
   migrateDatabase(db, path.join(root, 'drizzle'));
   const system = systemDb(db);
+  db.$client.transaction(() => system.producerIds().forEach((id) => fillFleetRows(producerDb(db, id))))();
   const newId = () => uuidv7();
   const newSecret = () => randomBytes(32).toString('base64url');
   const pipeline = openPipeline(db, { now, newId, nextSensorNo: system.nextSensorNo });

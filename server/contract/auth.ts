@@ -1,5 +1,5 @@
 import * as z from 'zod/mini';
-import { email, id, instant, language, slug, words } from './common';
+import { day, email, id, instant, language, slug, span, words } from './common';
 import { endpoint } from './endpoint';
 import { grants, roles, sides } from './words';
 
@@ -40,7 +40,7 @@ export const signOut = endpoint({
   id: 'auth.signOut',
   method: 'delete',
   path: '/api/auth/session',
-  access: { kind: 'person' },
+  access: { kind: 'person', evenSeeing: true },
   answer: 'nothing',
   problems: [],
 });
@@ -51,7 +51,19 @@ export const membership = z.object({
   side: z.enum(sides),
   storeIds: z.array(id),
   grants: z.array(z.enum(grants)),
-  producer: z.object({ slug, name: z.string(), timeZone: z.string(), language, urgentPhone: z.string() }),
+  producer: z.object({
+    slug,
+    name: z.string(),
+    timeZone: z.string(),
+    language,
+    urgentPhone: z.string(),
+    /** Changes with the picture; null where there is none. */
+    logo: z.nullable(z.string()),
+    /** When the service desk answers. */
+    serviceHours: z.array(span),
+    /** Today and later. */
+    holidays: z.array(z.object({ day, name: z.string() })),
+  }),
   /** What the rules allow some such subject: `read:Store`, `create:Request` … */
   abilities: z.array(z.string()),
 });
@@ -78,6 +90,25 @@ export const readSession = endpoint({
   path: '/api/auth/session',
   access: { kind: 'public', reason: 'tells a browser about its own cookie' },
   result: z.object({ me: z.nullable(whole) }),
+  problems: [],
+});
+
+/** Whether this session sees as somebody else, and since when and until when. */
+export const readSeeing = endpoint({
+  id: 'auth.readSeeing',
+  method: 'get',
+  path: '/api/auth/seeing',
+  access: { kind: 'public', reason: 'tells a browser about its own session' },
+  result: z.object({ seeing: z.nullable(z.object({ producer: slug, memberId: id, name: z.string(), until: instant })) }),
+  problems: [],
+});
+
+export const endSeeing = endpoint({
+  id: 'auth.endSeeing',
+  method: 'delete',
+  path: '/api/auth/seeing',
+  access: { kind: 'person', evenSeeing: true },
+  answer: 'nothing',
   problems: [],
 });
 

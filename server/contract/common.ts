@@ -40,3 +40,28 @@ export const paging = {
   limit: z.optional(count(1, 200)),
 };
 export const nextCursor = z.nullable(z.string());
+
+/** What a writer saw; grows with every change. */
+export const version = z.int(fault('number'));
+export const phone = words(40);
+/** A measure in inches or pounds. */
+export const measure = (least: number, most: number) => z.number(fault('measure')).check(z.minimum(least, fault('measure')), z.maximum(most, fault('measure')));
+export const timeZone = z.string(fault('choice')).check(z.maxLength(60, fault('choice')), z.refine(isTimeZone, fault('time-zone')));
+/** Hours on some days of the week, by local clocks. */
+export const span = z.strictObject({
+  days: z.array(z.literal([1, 2, 3, 4, 5, 6, 7])).check(z.minLength(1, fault('weekdays')), z.maxLength(7, fault('weekdays'))),
+  from: timeOfDay,
+  to: timeOfDay,
+}).check(z.refine(({ from, to }) => from < to, { error: 'span-backwards', path: ['to'] }));
+export const spans = z.array(span).check(z.maxLength(14, fault('too-long')));
+
+/** What a list is searched for. */
+export const search = z.optional(z.string().check(z.maxLength(120)));
+
+function isTimeZone(name: string): boolean {
+  try {
+    return new Intl.DateTimeFormat('en', { timeZone: name }).resolvedOptions().timeZone.length > 0;
+  } catch {
+    return false;
+  }
+}

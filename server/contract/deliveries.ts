@@ -1,5 +1,5 @@
 import * as z from 'zod/mini';
-import { day, fault, id, instant, nextCursor, paging, timeOfDay, withProducer, producerParams, words } from './common';
+import { day, fault, id, instant, nextCursor, paging, timeOfDay, withProducer, words } from './common';
 import { endpoint } from './endpoint';
 
 const bags = z.int(fault('bags')).check(z.minimum(0, fault('bags')), z.maximum(2000, fault('bags')));
@@ -98,14 +98,4 @@ export const recordDelivery = endpoint({
   status: 201,
   result: delivery,
   problems: ['bad-input', 'not-found', 'not-allowed', 'unknown-product', 'freezer-elsewhere', 'time-ahead'],
-});
-
-export const listProducts = endpoint({
-  id: 'products.list',
-  method: 'get',
-  path: '/api/:producer/products',
-  access: { kind: 'may', action: 'read', subject: 'Product' },
-  params: producerParams,
-  result: z.object({ products: z.array(z.object({ id, name: z.string(), bagPounds: z.number() })) }),
-  problems: [],
 });

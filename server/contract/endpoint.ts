@@ -6,8 +6,8 @@ import type { ProblemType } from './problem';
 export type Access =
   /** Anybody; the reason says why that is safe. */
   | { kind: 'public'; reason: string }
-  /** Any signed-in person, about themselves. */
-  | { kind: 'person' }
+  /** Any signed-in person, about themselves; `evenSeeing` is the way out for a session that sees as somebody else. */
+  | { kind: 'person'; evenSeeing?: true }
   /** A member of the producer in the path whose rules allow this action on some such subject. */
   | { kind: 'may'; action: Action; subject: Subject }
   /** The holder of a telemetry key. */

@@ -1,6 +1,8 @@
 import * as z from 'zod/mini';
-import { id, instant, nextCursor, paging, withProducer, producerParams } from './common';
+import { id, instant, withProducer } from './common';
+import { delivery, nextTruck } from './deliveries';
 import { endpoint } from './endpoint';
+import { requestSummary } from './requests';
 import { defrosts, placements } from './words';
 
 const pounds = z.number();
@@ -66,26 +68,26 @@ export const freezer = z.object({
 });
 export type Freezer = z.output<typeof freezer>;
 
-export const listFreezers = endpoint({
-  id: 'freezers.list',
-  method: 'get',
-  path: '/api/:producer/freezers',
-  access: { kind: 'may', action: 'read', subject: 'Freezer' },
-  params: producerParams,
-  query: z.strictObject(paging),
-  result: z.object({
-    freezers: z.array(z.object({ ...freezer.shape, storeId: id, store: z.string() })),
-    next: nextCursor,
-  }),
-  problems: ['bad-input'],
-});
-
+/** The freezer's page in one answer. What its reader may not see of it is left out. */
 export const readFreezer = endpoint({
   id: 'freezers.read',
   method: 'get',
   path: '/api/:producer/freezers/:freezerId',
   access: { kind: 'may', action: 'read', subject: 'Freezer' },
   params: withProducer({ freezerId: id }),
-  result: z.object({ ...freezer.shape, storeId: id }),
+  result: z.object({
+    freezer,
+    store: z.object({ id, name: z.string(), street: z.string(), city: z.string(), timeZone: z.string(), account: z.string(), district: z.string() }),
+    nextTruck: z.nullable(nextTruck),
+    /** The last ten about this freezer. */
+    requests: z.array(requestSummary),
+    /** The last ten with a line for this freezer, or for its store without saying which. */
+    deliveries: z.array(delivery),
+    /** Air of the last days, thinned: instant and °F. */
+    air: z.array(z.tuple([instant, z.number()])),
+    /** Which sensors hung in it, the youngest first; `to` is null for the one there now. */
+    sensors: z.array(z.object({ serial: z.string(), from: instant, to: z.nullable(instant) })),
+  }),
   problems: ['not-found'],
 });
+export type FreezerPage = z.output<(typeof readFreezer)['result']>;

@@ -1,7 +1,7 @@
 import * as z from 'zod/mini';
 import { email, fault, id, language, nextCursor, paging, producerParams, withProducer, words } from './common';
 import { endpoint } from './endpoint';
-import { roles, sides } from './words';
+import { grants, roles, sides } from './words';
 
 /** Roles whose view is narrowed by what they are assigned. */
 export const scopedRoles = ['store-manager', 'district-rep'] as const;
@@ -18,6 +18,7 @@ const member = z.object({
   language,
   role: z.enum(roles),
   side: z.enum(sides),
+  grants: z.array(z.enum(grants)),
   scopes: z.array(z.object({ ...scope.shape, name: z.string() })),
   active: z.boolean(),
 });
@@ -49,6 +50,8 @@ export const invitePerson = endpoint({
     /** Asked of a district rep only: the stores' person or the producer's. */
     side: z._default(z.enum(sides), 'producer'),
     scopes: z._default(scopes, []),
+    /** What the membership may do beyond its role. */
+    grants: z._default(z.array(z.enum(grants)), []),
   }),
   status: 201,
   result: member,
@@ -65,6 +68,9 @@ export const changePerson = endpoint({
     role: z.optional(z.enum(roles, fault('choice'))),
     side: z.optional(z.enum(sides)),
     scopes: z.optional(scopes),
+    grants: z.optional(z.array(z.enum(grants))),
+    /** Of the portal and its mail; the person can change it back. */
+    language: z.optional(language),
     active: z.optional(z.boolean()),
     /** Who takes over the live requests of somebody who is deactivated; nobody unless said. */
     handOverTo: z._default(z.nullable(id), null),
@@ -84,6 +90,20 @@ export const inviteAgain = endpoint({
   problems: ['not-found', 'not-allowed'],
 });
 
+/**
+ * From now on, until it is ended, this session is answered what that person's own would be, and may only read. It is
+ * recorded, and it ends by itself.
+ */
+export const seeAs = endpoint({
+  id: 'people.seeAs',
+  method: 'post',
+  path: '/api/:producer/people/:memberId/view',
+  access: { kind: 'may', action: 'update', subject: 'Person' },
+  params: withProducer({ memberId: id }),
+  answer: 'nothing',
+  problems: ['not-found', 'not-allowed'],
+});
+
 /** What people can be assigned besides single stores. */
 export const listPlaces = endpoint({
   id: 'people.places',
@@ -93,6 +113,7 @@ export const listPlaces = endpoint({
   params: producerParams,
   result: z.object({
     districts: z.array(z.object({ id, name: z.string() })),
+    /** Empty for those who may not read accounts. */
     accounts: z.array(z.object({ id, number: z.string(), name: z.string() })),
   }),
   problems: [],

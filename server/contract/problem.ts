@@ -34,6 +34,13 @@ export const problems = {
   'scope-unknown': 422,
   'truck-changed': 409,
   'time-ahead': 422,
+  'changed-meanwhile': 409,
+  'still-in-use': 409,
+  'place-unknown': 422,
+  'setup-impossible': 422,
+  'unknown-sensor': 422,
+  'sensor-elsewhere': 409,
+  'seeing-only': 403,
   'storage-full': 503,
   'server-error': 500,
 } as const;

@@ -65,6 +65,30 @@ export const listUnclaimed = endpoint({
   problems: ['bad-input'],
 });
 
+/** Sensors whose serial contains what was typed, in whatever freezer, the unclaimed first. */
+export const findSensors = endpoint({
+  id: 'sensors.find',
+  method: 'get',
+  path: '/api/:producer/sensors',
+  access: { kind: 'may', action: 'read', subject: 'Sensor' },
+  params: producerParams,
+  query: z.strictObject({ q: z.string().check(z.minLength(1, fault('required')), z.maxLength(120)) }),
+  result: z.object({
+    /** At most twenty. */
+    sensors: z.array(
+      z.object({
+        id,
+        serial: z.string(),
+        lastReadingAt: z.nullable(instant),
+        /** Channels of its last reading. */
+        probes: z.int(),
+        freezer: z.nullable(z.object({ id, name: z.string(), store: z.string() })),
+      }),
+    ),
+  }),
+  problems: ['bad-input'],
+});
+
 /** Readings that were not believed, youngest first. */
 export const listQuarantined = endpoint({
   id: 'sensors.listQuarantined',

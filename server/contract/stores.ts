@@ -1,5 +1,5 @@
 import * as z from 'zod/mini';
-import { id, instant, language, nextCursor, paging, producerParams, withProducer } from './common';
+import { id, instant, language, nextCursor, paging, producerParams, search, withProducer } from './common';
 import { delivery, nextTruck } from './deliveries';
 import { endpoint } from './endpoint';
 import { freezer } from './freezers';
@@ -30,6 +30,7 @@ export const storeSummary = z.object({
 });
 export type StoreSummary = z.output<typeof storeSummary>;
 
+/** By name; somebody with assigned stores gets those that need attention first. */
 export const listStores = endpoint({
   id: 'stores.list',
   method: 'get',
@@ -38,8 +39,11 @@ export const listStores = endpoint({
   params: producerParams,
   query: z.strictObject({
     ...paging,
-    q: z.optional(z.string().check(z.maxLength(120))),
+    q: search,
     truck: z.optional(z.enum(['today', 'late', 'none'])),
+    district: z.optional(id),
+    account: z.optional(id),
+    retired: z.optional(z.literal('only')),
   }),
   result: z.object({ stores: z.array(storeSummary), next: nextCursor }),
   problems: ['bad-input'],
@@ -64,6 +68,8 @@ export const readStore = endpoint({
       timeZone: z.string(),
       language,
       phone: z.string(),
+      /** Empty is the producer's own. */
+      urgentPhone: z.string(),
       account: z.string(),
       district: z.string(),
       deliveryDays: z.array(z.int()),

@@ -33,6 +33,9 @@ export type Weekday = 1 | 2 | 3 | 4 | 5 | 6 | 7;
 /** Local times of day, `HH:MM`. */
 export type Span = { days: Weekday[]; from: string; to: string };
 
+export const storeKinds = ['convenience', 'fuel', 'grocery', 'bait', 'liquor', 'other'] as const;
+export type StoreKind = (typeof storeKinds)[number];
+
 export const requestKinds = [
   'not-cooling',
   'door-or-hinge',

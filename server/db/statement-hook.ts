@@ -9,6 +9,11 @@ export const unownedTables: Record<string, string> = {
   session: 'a session is a person’s, who then chooses the producer by the path',
   sign_in_link: 'asked for before anybody is known',
   reading: 'reached by the number of a sensor that a scoped query answered for',
+  fleet_text: 'finds numbers of rows of fleet_row, which are then read with their producer',
+  fleet_text_data: 'part of fleet_text',
+  fleet_text_idx: 'part of fleet_text',
+  fleet_text_docsize: 'part of fleet_text',
+  fleet_text_config: 'part of fleet_text',
   outbox: 'sign-in mail belongs to a person; one job works through it and no route reads it',
   local_mail: 'exists in development and demo only',
 };
@@ -45,18 +50,42 @@ export function acrossProducers<T>(_reason: string, work: () => T): T {
   }
 }
 
-/** Refuses, at preparation, SQL that names a producer's table more often than it binds `producer_id`. */
+/** How many texts are remembered: as looked at, and as prepared. */
+const MOST_SEEN = 5000;
+const MOST_PREPARED = 500;
+
+/**
+ * Refuses, at preparation, SQL that names a producer's table more often than it binds `producer_id`; what was prepared is
+ * handed out again.
+ */
 export function watchStatements(connection: SQLite.Database): void {
-  const prepare = connection.prepare.bind(connection);
+  const prepare = keepingPrepared(connection.prepare.bind(connection));
   connection.prepare = (<T extends unknown[]>(source: string) => {
     if (across === 0 && !seen.has(source)) {
       const fault = unscoped(source);
       if (fault) throw new Error(`statement names ${fault} without its producer: ${source.slice(0, 200)}`);
-      if (seen.size > 5000) seen.clear();
+      if (seen.size > MOST_SEEN) seen.clear();
       seen.add(source);
     }
     return prepare<T>(source);
   }) as typeof connection.prepare;
+}
+
+/** Statements by their text, until there are too many; one in the middle of being read is made anew. */
+function keepingPrepared(prepare: SQLite.Database['prepare']) {
+  const prepared = new Map<string, SQLite.Statement>();
+  return <T extends unknown[]>(source: string): SQLite.Statement<T> => {
+    const known = prepared.get(source);
+    if (known && !known.busy) {
+      // Who had it before may have asked for rows in another shape.
+      if (known.reader) known.raw(false).pluck(false);
+      return known as SQLite.Statement<T>;
+    }
+    if (prepared.size >= MOST_PREPARED) prepared.clear();
+    const made = prepare<T>(source);
+    prepared.set(source, made as SQLite.Statement);
+    return made;
+  };
 }
 
 /** The first producer's table that the statement names without a scope, or null. */

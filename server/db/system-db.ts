@@ -11,29 +11,48 @@ export type Producer = typeof producers.$inferSelect;
 
 /** The few named acts that reach across producers: sign-in, memberships, telemetry routing. */
 export function systemDb(db: Database) {
+  const { activePerson, membershipsOf, membershipAt } = everyRequest(db);
+  const producerOf = keptProducers(db);
   return {
     personByEmail: (email: string): Person | undefined =>
       db.select().from(people).where(and(eq(people.email, email), isNull(people.deactivatedAt))).get(),
 
-    activePerson: (id: string): Person | undefined =>
-      db.select().from(people).where(and(eq(people.id, id), isNull(people.deactivatedAt))).get(),
+    activePerson: (id: string): Person | undefined => activePerson.get({ id }),
 
     producerBySlug: (slug: string): Producer | undefined => db.select().from(producers).where(eq(producers.slug, slug)).get(),
 
     /** Which producers a person works with, in the order they were joined. */
     membershipsOf: (personId: string) =>
-      acrossProducers('a person chooses among their producers', () =>
-        db
-          .select({ membership: memberships, producer: producers })
-          .from(memberships)
-          .innerJoin(producers, eq(producers.id, memberships.producerId))
-          .where(and(eq(memberships.personId, personId), isNull(memberships.deactivatedAt)))
-          .orderBy(memberships.createdAt, memberships.id)
-          .all(),
-      ),
+      acrossProducers('a person chooses among their producers', () => membershipsOf.all({ personId })),
+
+    /** What a person is at the producer of a slug. */
+    membershipAt: (personId: string, slug: string) => {
+      const found = acrossProducers('a person names one of their producers', () => membershipAt.get({ personId, slug }));
+      if (!found) return undefined;
+      const { producerId, version, ...membership } = found;
+      return { membership: { ...membership, producerId }, producer: producerOf(producerId, version) };
+    },
+
+    /** A member of a producer with the producer, while they work there. */
+    memberAt: (producerId: string, memberId: string) =>
+      db
+        .select({ membership: memberships, producer: producers })
+        .from(memberships)
+        .innerJoin(producers, eq(producers.id, memberships.producerId))
+        .where(and(eq(memberships.producerId, producerId), eq(memberships.id, memberId), isNull(memberships.deactivatedAt)))
+        .get(),
+
+    producerIds: (): string[] => db.select({ id: producers.id }).from(producers).all().map(({ id }) => id),
+
+    producerById: (id: string): Producer | undefined => db.select().from(producers).where(eq(producers.id, id)).get(),
+
+    /** Whoever saw an older version is told before. */
+    changeProducer: (id: string, patch: Partial<Omit<Producer, 'id' | 'slug' | 'version' | 'createdAt'>>): void => {
+      db.update(producers).set({ ...patch, version: sql`${producers.version} + 1` }).where(eq(producers.id, id)).run();
+    },
 
     /** The scope is worked out from what stands in the database now, so a change acts on the next request. */
-    viewerOf: (membership: typeof memberships.$inferSelect, now: number): Viewer => ({
+    viewerOf: (membership: Member, now: number): Viewer => ({
       personId: membership.personId,
       membershipId: membership.id,
       role: membership.role,
@@ -121,7 +140,51 @@ export function systemDb(db: Database) {
 
 export type SystemDb = ReturnType<typeof systemDb>;
 
-function scopeOf(db: Database, member: typeof memberships.$inferSelect, now: number): string[] {
+/** Asked with every request, so built once. */
+function everyRequest(db: Database) {
+  const { placeholder } = sql;
+  const { id, personId, role, side, grants } = memberships;
+  const activePerson = db
+    .select()
+    .from(people)
+    .where(and(eq(people.id, placeholder('id')), isNull(people.deactivatedAt)))
+    .prepare();
+  const membershipsOf = acrossProducers('a person chooses among their producers', () =>
+    db
+      .select({ membership: memberships, producer: producers })
+      .from(memberships)
+      .innerJoin(producers, eq(producers.id, memberships.producerId))
+      .where(and(eq(memberships.personId, placeholder('personId')), isNull(memberships.deactivatedAt)))
+      .orderBy(memberships.createdAt, memberships.id)
+      .prepare(),
+  );
+  const membershipAt = acrossProducers('a person names one of their producers', () =>
+    db
+      .select({ id, personId, role, side, grants, producerId: producers.id, version: producers.version })
+      .from(producers)
+      .innerJoin(memberships, eq(memberships.producerId, producers.id))
+      .where(and(eq(producers.slug, placeholder('slug')), eq(memberships.personId, placeholder('personId')), isNull(memberships.deactivatedAt)))
+      .prepare(),
+  );
+  return { activePerson, membershipsOf, membershipAt };
+}
+
+type Member = Pick<typeof memberships.$inferSelect, 'id' | 'producerId' | 'personId' | 'role' | 'side' | 'grants'>;
+
+/** A producer as it was last read, until its version says that it changed. */
+function keptProducers(db: Database): (id: string, version: number) => Producer {
+  const kept = new Map<string, Producer>();
+  return (id, version) => {
+    const known = kept.get(id);
+    if (known?.version === version) return known;
+    const read = db.select().from(producers).where(eq(producers.id, id)).get();
+    if (!read) throw new Error('a membership of no producer');
+    kept.set(id, read);
+    return read;
+  };
+}
+
+function scopeOf(db: Database, member: Member, now: number): string[] {
   const { producerId, id, role } = member;
   if (role === 'store-manager' || role === 'district-rep') return assignedStores(db, producerId, id);
   if (role === 'driver') return stopsOfTheDay(db, producerId, now);
@@ -129,17 +192,18 @@ function scopeOf(db: Database, member: typeof memberships.$inferSelect, now: num
   return [];
 }
 
-const assignedStores = (db: Database, producer: string, member: string): string[] =>
-  db
-    .all<{ id: string }>(
-      sql`select s.id from ${membershipScopes} m join ${stores} s on s.producer_id = ${producer} and s.id = m.store_id
-            where m.producer_id = ${producer} and m.membership_id = ${member}
-          union select s.id from ${membershipScopes} m join ${stores} s on s.producer_id = ${producer} and s.district_id = m.district_id
-            where m.producer_id = ${producer} and m.membership_id = ${member}
-          union select s.id from ${membershipScopes} m join ${stores} s on s.producer_id = ${producer} and s.account_id = m.account_id
-            where m.producer_id = ${producer} and m.membership_id = ${member}`,
-    )
-    .map((row) => row.id);
+/** `cross join` begins with what is assigned, whatever SQLite thinks of the tables' sizes. */
+function assignedStores(db: Database, producer: string, member: string): string[] {
+  const ids = db.values<[string]>(
+    sql`select m.store_id from ${membershipScopes} m
+          where m.producer_id = ${producer} and m.membership_id = ${member} and m.store_id is not null
+        union all select s.id from ${membershipScopes} m cross join ${stores} s on s.producer_id = ${producer} and s.district_id = m.district_id
+          where m.producer_id = ${producer} and m.membership_id = ${member}
+        union all select s.id from ${membershipScopes} m cross join ${stores} s on s.producer_id = ${producer} and s.account_id = m.account_id
+          where m.producer_id = ${producer} and m.membership_id = ${member}`,
+  );
+  return [...new Set(ids.map(([id]) => id))].sort();
+}
 
 const DAY = 86_400_000;
 

@@ -1,19 +1,25 @@
 import { accounts, districts, freezers, installs, lanes, memberships, membershipScopes, models as modelTable, people, producerDb, producers, products, sensors, stores, type ProducerDb } from '../db';
-import type { Language, Weekday } from '../contract/words';
+import type { Language, StoreKind, Weekday } from '../contract/words';
+import { isGtin } from '../domain/gtin';
 import type { Services } from '../http/context';
+import { contacts } from './data/contacts';
 import { bagSizes, models, twoDoor, type DemoModel, type DemoPerson, type DemoProducer } from './data/producers';
+import { comingHolidays } from './holidays';
 import { seeded, type Random } from './random';
 
 const DAY = 86_400_000;
+const timeZone = 'America/Chicago';
 export const historyDays = 120;
 
 /** Writes one producer with everybody and everything but its history. Answers its id. */
 export function createDemoProducer(services: Services, demo: DemoProducer): string {
   const { db, newId, now } = services;
   const id = newId();
-  const { slug, name, language, urgentPhone } = demo;
+  const { slug, name, language, urgentPhone, serviceHours, mailSender } = demo;
   const createdAt = now() - (historyDays + 30) * DAY;
-  db.insert(producers).values({ id, slug, name, language, urgentPhone, timeZone: 'America/Chicago', createdAt }).run();
+  const holidays = comingHolidays(now(), timeZone, language);
+  const sender = { senderName: mailSender.name, replyTo: mailSender.replyTo };
+  db.insert(producers).values({ id, slug, name, language, urgentPhone, timeZone, serviceHours, holidays, ...sender, createdAt }).run();
   const plot: Plot = { demo, db: producerDb(db, id), newId, createdAt, now: now(), random: seeded(slug), ids: new Map(), nextSensorNo: services.system.nextSensorNo };
   createPlaces(plot);
   createFreezers(plot);
@@ -50,31 +56,35 @@ const spoken = (store: string, usual: Language): Language => (/Campo Verde|Esqui
 
 const usualDays: Weekday[][] = [[2, 5], [1, 4], [3, 6], [1, 3, 5], [2, 4, 6], [4, 7]];
 const driverNotes = { en: 'Gate on the left; ring for the back door.', es: 'Portón a la izquierda; toque el timbre de atrás.' };
-const kinds = ['convenience', 'fuel', 'grocery', 'bait'];
+const kinds: StoreKind[] = ['convenience', 'fuel', 'grocery', 'bait'];
+
+const terms = { en: 'Net 30', es: '30 días' };
 
 function createPlaces(plot: Plot): void {
   const { db, demo, createdAt, random } = plot;
   for (const name of demo.districts) db.insert(districts, { id: named(plot, name), name, createdAt });
   demo.accounts.forEach((account, group) => {
     const accountId = named(plot, account.name);
-    db.insert(accounts, { id: accountId, number: account.number, name: account.name, terms: 'net 30', language: account.language, createdAt });
-    account.stores.forEach((name, i) => {
+    const { number, name, language } = account;
+    db.insert(accounts, { id: accountId, number, name, terms: terms[language], language, contacts: contacts[number], createdAt });
+    account.stores.forEach((store, i) => {
       const [south, north] = demo.area;
       db.insert(stores, {
-        id: named(plot, name),
+        id: named(plot, store),
         accountId,
         districtId: idOf(plot, demo.districts[(i + group) % demo.districts.length] ?? ''),
-        name,
+        name: store,
         kind: kinds[group] ?? 'convenience',
         street: `${random.whole(100, 2900)} ${random.pick(demo.streets)}`,
         city: random.pick(demo.towns),
         region: demo.region,
         postalCode: `${demo.region === 'TX' ? '783' : '726'}${String(random.whole(10, 89))}`,
-        latitude: random.between(south?.[0] ?? 0, north?.[0] ?? 0),
-        longitude: random.between(south?.[1] ?? 0, north?.[1] ?? 0),
-        timeZone: 'America/Chicago',
-        language: spoken(name, account.language),
+        latitude: Number(random.between(south?.[0] ?? 0, north?.[0] ?? 0).toFixed(4)),
+        longitude: Number(random.between(south?.[1] ?? 0, north?.[1] ?? 0).toFixed(4)),
+        timeZone,
+        language: spoken(store, language),
         phone: `555-01${String(random.whole(10, 99))}`,
+        urgentPhone: demo.urgentPhones[store],
         openHours: [6, 22],
         receivingHours: [{ days: [1, 2, 3, 4, 5, 6], from: '06:30', to: '15:00' }],
         deliveryDays: random.pick(usualDays),
@@ -90,9 +100,13 @@ const placesAt = {
   es: ['Congelador del frente, junto a la caja', 'Pared lateral, exterior', 'Junto a las bombas', 'Final del pasillo'],
 };
 
+const conditions = { en: ['good', 'good', 'worn'], es: ['bueno', 'bueno', 'gastado'] };
+
 function createFreezers(plot: Plot): void {
   const { db, demo, createdAt } = plot;
-  for (const pounds of bagSizes) db.insert(products, { id: named(plot, `${pounds} lb`), name: `${pounds} lb`, bagPounds: pounds, createdAt });
+  for (const pounds of bagSizes) {
+    db.insert(products, { id: named(plot, `${pounds} lb`), name: `${pounds} lb`, bagPounds: pounds, gtin: gtinOf(demo, pounds), createdAt });
+  }
   for (const model of models) {
     const { name, width, depth, height, doors, rated, defrost } = model;
     db.insert(modelTable, { id: named(plot, name), name, insideWidthIn: width, insideDepthIn: depth, insideHeightIn: height, doors, ratedPounds: rated, defrost, createdAt });
@@ -105,6 +119,12 @@ function createFreezers(plot: Plot): void {
       createFreezer(plot, { store, position, number, fittedAt: fittedAt(plot, store, position) });
     }
   });
+}
+
+/** The item's number is its pounds; the last digit is whichever makes it right. */
+function gtinOf({ gtinPrefix }: DemoProducer, pounds: number): string | undefined {
+  const digits = `${gtinPrefix}${String(pounds).padStart(5, '0')}`;
+  return [...'0123456789'].map((check) => digits + check).find(isGtin);
 }
 
 /** Since when a sensor hangs in it; null where none does. */
@@ -143,7 +163,7 @@ function createFreezer(plot: Plot, { store, position, number, fittedAt }: Place)
     assetNumber: String(40_100 + number),
     name: words[position === 0 ? (outdoor ? 2 : random.pick([0, 3])) : 1] ?? '',
     placement: outdoor ? 'outdoor' : 'indoor',
-    condition: random.pick(['good', 'good', 'worn']),
+    condition: random.pick(conditions[demo.language]),
     channelDropIn: 1.5,
     rackIn: 2,
     headroomIn: 3,

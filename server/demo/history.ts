@@ -1,10 +1,12 @@
-import { and, deliveries, deliveryLines, desc, eq, lte, nextTruckLoads, nextTrucks, readings as readingTable, sensors, sql, type Database, type ProducerDb } from '../db';
+import { and, deliveries, deliveryLines, desc, eq, lte, nextTruckLoads, nextTrucks, readings as readingTable, sensors, sql, type Database, writeFleetRows, type ProducerDb } from '../db';
 import { membersByRole } from '../db/views/people';
 import { dayOf } from '../domain/civil';
-import { refreshState } from '../telemetry/refresh-state';
+import { refreshDays, refreshState, WINDOW_MS } from '../telemetry/refresh-state';
 import type { RawReading } from '../telemetry/readings-of';
 import type { Drop, FleetFreezer } from './simulation';
 import { nextTruckOf, type DemoStore, type Staged } from './trucks';
+
+const DAY = 86_400_000;
 
 /** Writes readings of the past, which the door would find too old; what they mean is worked out once for each freezer. */
 export function historyWriter(db: Database, scoped: ProducerDb): (freezer: FleetFreezer, list: RawReading[]) => void {
@@ -15,6 +17,8 @@ export function historyWriter(db: Database, scoped: ProducerDb): (freezer: Fleet
     const sensor = scoped.select({ no: sensors.no }).from(sensors).where(eq(sensors.serial, freezer.serial)).get();
     if (!sensor) throw new Error(`no sensor ${freezer.serial}`);
     for (const { at, probes, airC, supplyV } of list) insert.run({ sensorNo: sensor.no, at, probes, airC, supplyV });
+    const last = list.at(-1)?.at ?? 0;
+    for (let back = 4; back > 0; back -= 1) refreshDays(db, scoped, freezer.id, last - back * (WINDOW_MS - DAY));
     refreshState(db, scoped, freezer.id);
   };
 }
@@ -60,6 +64,7 @@ export function setNextTrucks(scoped: ProducerDb, newId: () => string, stores: D
     const id = newId();
     scoped.insert(nextTrucks, { id, storeId: store.id, day: truck.day, from: truck.from, to: truck.to, updatedAt: now });
     for (const { productId, bags } of usualLoad(scoped, store.id)) scoped.insert(nextTruckLoads, { id: newId(), nextTruckId: id, productId, bags });
+    writeFleetRows(scoped, { storeId: store.id });
   }
 }
 
@@ -69,6 +74,7 @@ function removeTrucks(scoped: ProducerDb, storeId: string, upTo: string): void {
     scoped.delete(nextTruckLoads, eq(nextTruckLoads.nextTruckId, id));
     scoped.delete(nextTrucks, eq(nextTrucks.id, id));
   }
+  if (over.length > 0) writeFleetRows(scoped, { storeId });
 }
 
 /** As much as the last truck brought. */

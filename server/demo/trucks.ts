@@ -51,5 +51,5 @@ function truckOn({ name, timeZone }: DemoStore, day: string): Truck {
   const usual = seeded(`${name} usual`).whole(0, 44) * 10;
   const hour = 7 + Math.floor(usual / 60);
   const from = instantOf(day, `${String(hour).padStart(2, '0')}:${String(usual % 60).padStart(2, '0')}`, timeZone);
-  return { day, from, to: from + 90 * MINUTE, at: from + Math.round(seeded(`${name} ${day}`).between(-5, 92)) * MINUTE };
+  return { day, from, to: from + 90 * MINUTE, at: from + Math.round(seeded(`${name} ${day}`).between(-5, 104)) * MINUTE };
 }

@@ -1,5 +1,5 @@
 import { abilityFor } from '../contract/ability';
-import { freezerStates, producerDb, type ProducerDb } from '../db';
+import { fillFleetRows, freezerStates, producerDb, type ProducerDb } from '../db';
 import { newTelemetryKey } from '../features/telemetry/new-key';
 import type { Services } from '../http/context';
 import { runAction } from '../http/run-action';
@@ -42,7 +42,7 @@ function reopened(services: Services, demo: DemoProducer, producerId: string, kn
   const scoped = producerDb(services.db, producerId);
   const fleet = fleetOf(scoped, demo.troubles.hungry);
   const memory = known?.memory ?? recalled(scoped, fleet, services.now());
-  return { demo, key: known?.key ?? makeKey(services, producerId), scoped, fleet, memory };
+  return { demo, key: known?.key ?? makeKey(services, producerId, demo), scoped, fleet, memory };
 }
 
 function recalled(scoped: ProducerDb, fleet: FleetFreezer[], now: number): Memory {
@@ -68,7 +68,7 @@ export async function makeProducer(services: Services, demo: DemoProducer, progr
     const memory = liveThrough(services, demo, scoped, fleet);
     createRequests(services, scoped, demo.slug, pictures);
     createStrays(services, demo, producerId);
-    return { demo, key: makeKey(services, producerId), scoped, fleet, memory };
+    return { demo, key: makeKey(services, producerId, demo), scoped, fleet, memory };
   })();
 }
 
@@ -85,11 +85,14 @@ function liveThrough({ db, newId, now }: Services, demo: DemoProducer, scoped: P
   });
   writeDeliveries(scoped, newId, demo.lotPrefix, drops);
   setNextTrucks(scoped, newId, storesOf(scoped), memory.troubles.staged, at);
+  fillFleetRows(scoped);
   return memory;
 }
 
-function makeKey(services: Services, producerId: string): string {
+const keyNames = { en: 'Demo sensors', es: 'Sensores de demostración' };
+
+function makeKey(services: Services, producerId: string, { language }: DemoProducer): string {
   const at = services.now();
   const ability = abilityFor({ personId: '', membershipId: '', role: 'producer-admin', side: 'producer', storeIds: [], grants: [] });
-  return runAction(services, { producerId, id: 'operator', ability }, 'create-telemetry-key', at, (tx) => newTelemetryKey(tx, { id: services.newId(), key: services.newSecret(), name: 'demo sensors', now: at }));
+  return runAction(services, { producerId, id: 'operator', ability }, 'create-telemetry-key', at, (tx) => newTelemetryKey(tx, { id: services.newId(), key: services.newSecret(), name: keyNames[language], now: at }));
 }

@@ -7,7 +7,8 @@ import { freshnessOf, type Freshness } from './freshness';
 export interface StoreNow {
   timeZone: string;
   freezers: FreezerNow[];
-  nextTruck: (Window & { day: string; load: { bags: number }[] }) | null;
+  /** Null where none is set; undefined where whoever reads is not told of trucks. */
+  nextTruck: (Window & { day: string; load: { bags: number }[] }) | null | undefined;
   /** Newest first. */
   deliveries: { at: number; lines: { bags: number }[] }[];
   /** ISO weekdays on which a truck usually comes. */
@@ -25,8 +26,8 @@ export type FullSaid =
   | { key: 'no-freezers' | 'learning' | 'waiting' }
   | { key: 'no-sensor'; lastDelivery: number | null }
   | { key: 'silent'; since: number }
-  | { key: 'empty'; place: Place; truck: Window | null }
-  | { key: RunOutKey; place: Place; runOut: LaneRunOut; truck: Window | null }
+  | { key: 'empty'; place: Place; truck: Window | null | undefined }
+  | { key: RunOutKey; place: Place; runOut: LaneRunOut; truck: Window | null | undefined }
   | { key: 'keeps'; past: string | null };
 
 export interface FullAnswer {
@@ -68,7 +69,8 @@ export interface ComingAnswer {
 export interface Answers {
   full: FullAnswer;
   cold: ColdAnswer;
-  coming: ComingAnswer;
+  /** Null for whoever is not told of trucks. */
+  coming: ComingAnswer | null;
 }
 
 /** Is it full, is it cold, when is the truck coming: what to say at `now`, without a language. */
@@ -76,9 +78,9 @@ export function answersFor(store: StoreNow, now: number): Answers {
   return { full: fullAnswer(store, now), cold: coldAnswer(store.freezers, now), coming: comingAnswer(store, now) };
 }
 
-/** The next truck while it is still to come: none once a delivery was recorded on its day. */
+/** The next truck while it is still to come, as far as it is told: none once a delivery was recorded on its day. */
 export function truckToCome({ nextTruck, deliveries, timeZone }: StoreNow): StoreNow['nextTruck'] {
-  return nextTruck && !deliveries.some(({ at }) => dayOf(at, timeZone) === nextTruck.day) ? nextTruck : null;
+  return nextTruck && deliveries.some(({ at }) => dayOf(at, timeZone) === nextTruck.day) ? null : nextTruck;
 }
 
 function fullAnswer(store: StoreNow, now: number): FullAnswer {
@@ -103,6 +105,7 @@ const worstFirst: Standing['kind'][] = [
   'runs-out-first',
   'may-run-out-first',
   'runs-out',
+  'runs-out-untold',
   'truck-first',
   'keeps',
   'learning',
@@ -126,7 +129,7 @@ function soonness(standing: Standing): number {
   return 0;
 }
 
-function sayStanding(standing: Standing, freezer: FreezerNow, truck: Window | null, lastDelivery: number | null): FullSaid {
+function sayStanding(standing: Standing, freezer: FreezerNow, truck: Window | null | undefined, lastDelivery: number | null): FullSaid {
   switch (standing.kind) {
     case 'no-sensor':
       return { key: 'no-sensor', lastDelivery };
@@ -144,7 +147,10 @@ function sayStanding(standing: Standing, freezer: FreezerNow, truck: Window | nu
     case 'may-run-out-first':
     case 'runs-out':
     case 'truck-first':
-      return { key: standing.kind, place: placeOf(freezer, standing.runOut.lane), runOut: standing.runOut, truck };
+    case 'runs-out-untold': {
+      const key = standing.kind === 'runs-out-untold' ? 'runs-out' : standing.kind;
+      return { key, place: placeOf(freezer, standing.runOut.lane), runOut: standing.runOut, truck };
+    }
   }
 }
 
@@ -178,9 +184,10 @@ function nothingFelt(freezers: FreezerNow[], felt: { at: number }[]): ColdSaid {
   return { key: freezers.some(({ sensor }) => sensor) ? 'waiting' : 'no-sensor' };
 }
 
-function comingAnswer(store: StoreNow, now: number): ComingAnswer {
+function comingAnswer(store: StoreNow, now: number): ComingAnswer | null {
   const today = dayOf(now, store.timeZone);
   const truck = truckToCome(store);
+  if (truck === undefined) return null;
   const next = truck && { day: truck.day, from: truck.from, to: truck.to, bags: bagsOf(truck.load) };
   const delivered = store.deliveries.find(({ at }) => dayOf(at, store.timeZone) === today);
   if (delivered) return { value: null, said: { key: 'delivered', at: delivered.at, bags: bagsOf(delivered.lines), next } };

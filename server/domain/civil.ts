@@ -53,6 +53,10 @@ export const hourOf = (instant: number, timeZone: string): number => {
   return (((local % DAY_MS) + DAY_MS) % DAY_MS) / HOUR_MS;
 };
 
+/** `YYYY-MM-DD HH:MM` by local clocks. */
+export const localMinute = (instant: number, timeZone: string): string =>
+  new Date(instant + offsetAt(instant, timeZone)).toISOString().slice(0, 16).replace('T', ' ');
+
 /**
  * The instant at which clocks of the zone show `day` and `HH:MM`. An hour that comes twice means its first time; one
  * that is skipped means as long after midnight as if it were not, as RFC 5545 section 3.3.5 reads such times.

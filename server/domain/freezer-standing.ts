@@ -44,17 +44,20 @@ export type Standing =
   | { kind: 'runs-out-first'; runOut: LaneRunOut }
   | { kind: 'may-run-out-first'; runOut: LaneRunOut }
   | { kind: 'truck-first'; runOut: LaneRunOut }
-  /** No truck is known to come before. */
+  /** No truck comes before. */
   | { kind: 'runs-out'; runOut: LaneRunOut }
+  /** Whether a truck comes before is not told to whoever reads. */
+  | { kind: 'runs-out-untold'; runOut: LaneRunOut }
   /** `past` is the last local day with ice on it, null where it keeps beyond the horizon. */
   | { kind: 'keeps'; past: string | null }
   | { kind: 'learning' };
 
 /**
- * Where a freezer stands at `now`, for a store in `zone` whose next truck, if any, comes in `truck`.
+ * Where a freezer stands at `now`, for a store in `zone` whose next truck comes in `truck`: null where none is set,
+ * undefined where whoever reads is not told of trucks.
  * A truck past its window is no promise: nobody knows when it comes.
  */
-export function standingOf(freezer: FreezerNow, truck: Window | null, now: number, zone: string): Standing {
+export function standingOf(freezer: FreezerNow, truck: Window | null | undefined, now: number, zone: string): Standing {
   const { state } = freezer;
   if (!freezer.sensor) return { kind: 'no-sensor' };
   if (!state) return { kind: 'waiting' };
@@ -71,7 +74,7 @@ function firstRunOut(runOuts: RunOut[]): LaneRunOut | null {
   return dated.reduce<LaneRunOut | null>((first, one) => (first && first.likely <= one.likely ? first : one), null);
 }
 
-function againstTruck(runOut: LaneRunOut | null, truck: Window | null, now: number, zone: string): Standing {
+function againstTruck(runOut: LaneRunOut | null, truck: Window | null | undefined, now: number, zone: string): Standing {
   if (!runOut) return { kind: 'keeps', past: null };
   if (runOut.likely <= now) return { kind: 'perhaps-empty', runOut };
   const soonest = runOut.early ?? runOut.likely;
@@ -80,5 +83,6 @@ function againstTruck(runOut: LaneRunOut | null, truck: Window | null, now: numb
   if (arrival && soonest < arrival) return { kind: 'may-run-out-first', runOut };
   const past = addDays(dayOf(soonest, zone), -1);
   if (past >= addDays(dayOf(now, zone), keepsAfterDays)) return { kind: 'keeps', past };
+  if (truck === undefined) return { kind: 'runs-out-untold', runOut };
   return { kind: arrival ? 'truck-first' : 'runs-out', runOut };
 }

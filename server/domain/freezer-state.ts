@@ -1,5 +1,6 @@
 import { midnights } from './civil';
 import { coolingOf } from './cooling';
+import { freezerDays, type FreezerDay } from './freezer-days';
 import { deliveriesSeen, type DeliverySeen } from './deliveries-seen';
 import { laneReader, type LaneReader, type Told } from './lane-reader';
 import { levelOf, possibleDistance, PRIOR_K_SD, probeStacks, setupFaults } from './level';
@@ -45,11 +46,17 @@ export interface FoldInput {
   kSdShare?: number;
 }
 
+/** What a set of readings means: the state at its end, and its local days. */
+export interface Folded {
+  state: FreezerState;
+  days: FreezerDay[];
+}
+
 /**
  * Works out the current state from a set of readings. It depends on the set alone: order and repeats do not matter.
  * Null when the setup cannot be, or no probe has told anything.
  */
-export function foldState({ setup, timeZone, readings, kSdShare = PRIOR_K_SD }: FoldInput): FreezerState | null {
+export function foldReadings({ setup, timeZone, readings, kSdShare = PRIOR_K_SD }: FoldInput): Folded | null {
   if (setupFaults(setup).length > 0) return null;
   const ordered = orderedReadings(readings, (distanceIn) => possibleDistance(setup, distanceIn));
   const reader = laneReader(setup);
@@ -65,7 +72,7 @@ export function foldState({ setup, timeZone, readings, kSdShare = PRIOR_K_SD }: 
   const left = level.lanes.map(({ bags, pounds }) => (bags === 0 ? 0 : pounds));
   const laneRunOuts = setup.lanes.map((_, i) => plainRunOut(left[i] ?? 0, sdPounds[i] ?? 0, rates[i] ?? NO_RATE, last.at));
   const lane = firstLane(laneRunOuts);
-  return {
+  const state = {
     at: last.at,
     level,
     distancesIn: last.distancesIn,
@@ -77,6 +84,7 @@ export function foldState({ setup, timeZone, readings, kSdShare = PRIOR_K_SD }: 
     deliveries: seen,
     history: historyOf(told, level.capacityPounds, starts),
   };
+  return { state, days: freezerDays(told, ordered, setup.lanes.map(({ bagPounds }) => bagPounds), timeZone) };
 }
 
 const NO_RATE: DailyRate = { poundsPerDay: 0, sdPounds: 0, days: 0 };

@@ -5,7 +5,7 @@ import { BULK_POUNDS_PER_CUBIC_INCH, ICE_POUNDS_PER_CUBIC_INCH } from './units';
 /** Beyond the floor by up to this much (in) is an empty column; further is impossible. */
 const FLOOR_TOLERANCE_IN = 2;
 /** Three thirds written with three digits miss one by a thousandth. */
-const SHARES_TOLERANCE = 0.002;
+export const SHARES_TOLERANCE = 0.002;
 /** One sd of a probe's own noise (in). Common practice, no published source. */
 export const PROBE_NOISE_IN = 0.3;
 /** A bag lies flat: its thickness over the edge of a cube of the same volume. Common practice, no published source. */

@@ -2,9 +2,10 @@ import type { Logger } from 'pino';
 import type { Ability, Action, Subject, Viewer } from '../contract/ability';
 import type { Language } from '../contract/words';
 import type { Config } from '../config';
-import type { Database, Producer, ProducerDb, SystemDb } from '../db';
+import type { Database, FleetPart, Producer, ProducerDb, SystemDb } from '../db';
 import type { MailMessage } from '../features/mail/compose';
 import type { Storage } from '../ports/storage';
+import type { Seen } from './seeing';
 import type { Pipeline } from '../telemetry/pipeline';
 
 /** Everything built once at start; only routes' plumbing holds it whole. */
@@ -30,6 +31,14 @@ export interface ActionTx {
   /** What changed, for the audit trail; ids and plain values only, no names. */
   audit: (type: Subject, id: string, changes: Record<string, unknown>) => void;
   mail: (message: MailMessage) => void;
+  /** Works out anew what the readings of a freezer mean and how lists show it: after its lanes, measures or sensor changed. */
+  freezerChanged: (freezerId: string) => void;
+  /** Writes anew how lists show freezers: after something else that they show changed. */
+  listAnew: (part: FleetPart) => void;
+  /** Changes the producer itself; a new risk limit is worked out for its freezers. */
+  changeProducer: (patch: Parameters<SystemDb['changeProducer']>[1]) => void;
+  /** Gives a member's person another language. */
+  speak: (memberId: string, language: Language) => void;
   /** The person of an address, made where there is none. */
   personOf: (wanted: { email: string; name: string; language: Language }) => string;
 }
@@ -39,7 +48,11 @@ export interface ProducerContext {
   db: ProducerDb;
   viewer: Viewer;
   ability: Ability;
-  producer: Pick<Producer, 'slug' | 'name' | 'timeZone' | 'language' | 'urgentPhone'>;
+  /** Of whoever reads the answer. */
+  language: Language;
+  producer: Omit<Producer, 'id' | 'createdAt'>;
+  /** The same, as it stands after an act. */
+  readProducer: () => Omit<Producer, 'id' | 'createdAt'>;
   now: number;
   newId: () => string;
   newSecret: () => string;
@@ -51,7 +64,9 @@ export interface ProducerContext {
 
 export interface PersonContext {
   system: SystemDb;
+  /** Whose session it is, or who it sees as. */
   personId: string;
+  seen: Seen | null;
   sessionHandle: string;
   now: number;
 }

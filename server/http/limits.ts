@@ -14,7 +14,8 @@ export const limit = ({ seconds, most, key }: Limit, patience: number): RequestH
   rateLimit({
     windowMs: seconds * 1000,
     limit: most * patience,
-    standardHeaders: 'draft-8',
+    // Who is under the limit needs no word of it, and working it out costs more than the answer.
+    standardHeaders: false,
     legacyHeaders: false,
     keyGenerator: key ?? addressOf,
     handler: (_req, _res, next) => next(problem('too-many-requests', { seconds })),

@@ -1,6 +1,5 @@
 import type { ErrorRequestHandler, Request, Response } from 'express';
 import type { Logger } from 'pino';
-import type {} from 'pino-http';
 import en from '../../locales/en/problems.json';
 import es from '../../locales/es/problems.json';
 import { problems, problemTypePrefix, type FieldFault, type ProblemDocument, type ProblemType } from '../contract/problem';
@@ -19,14 +18,22 @@ export class ProblemError extends Error {
 export const problem = (type: ProblemType, params?: Record<string, string | number>, errors?: FieldFault[]) =>
   new ProblemError(type, params, errors);
 
+/** What is not there and what is not this viewer's to see are the same to them. */
+export function orNotFound<T>(row: T | null | undefined | false): T {
+  if (!row) throw problem('not-found');
+  return row;
+}
+
 /** One handler for everything thrown: known problems as they are, unknown ones logged and answered bare. */
 export const problemHandler =
-  (log: Logger): ErrorRequestHandler =>
+  (log: Logger, newId: () => string): ErrorRequestHandler =>
   (error: unknown, req, res, next) => {
     if (res.headersSent) return next(error);
     const known = recognise(error);
-    if (!known) log.error({ err: error, requestId: req.id, method: req.method, path: req.path }, 'request failed');
-    sendProblem(req, res, known ?? problem('server-error'), known ? undefined : String(req.id));
+    if (known) return sendProblem(req, res, known);
+    const requestId = newId();
+    log.error({ err: error, requestId, method: req.method, path: req.path }, 'request failed');
+    sendProblem(req, res, problem('server-error'), requestId);
   };
 
 /** The type is for our own screens, which have its words; title and detail are for anybody else who asks. */

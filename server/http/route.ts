@@ -3,10 +3,12 @@ import type * as z from 'zod/mini';
 import { abilityFor, type Ability } from '../contract/ability';
 import type { Access, Body, Endpoint, Params, Query, Result } from '../contract/endpoint';
 import type { FieldFault } from '../contract/problem';
-import { producerDb } from '../db';
+import { producerDb, type Producer } from '../db';
 import type { PersonContext, ProducerContext, Services } from './context';
+import { MadeJson } from './made-json';
 import { problem } from './problem';
 import { runAction } from './run-action';
+import { refuseWhileSeeing, seenBy, type Seen } from './seeing';
 import { signedIn } from './session';
 
 type ContextOf<A extends Access> = A['kind'] extends 'may' ? ProducerContext : A['kind'] extends 'person' ? PersonContext : Services;
@@ -19,7 +21,7 @@ export interface Incoming<E> {
   res: Response;
 }
 
-type Handler<E extends Endpoint> = (ctx: ContextOf<E['access']>, incoming: Incoming<E>) => Result<E> | Promise<Result<E>>;
+type Handler<E extends Endpoint> = (ctx: ContextOf<E['access']>, incoming: Incoming<E>) => Result<E> | MadeJson | Promise<Result<E>>;
 
 /** What must happen before the body is looked at: keys, limits, other media types. */
 type Before = (services: Services) => RequestHandler[];
@@ -42,7 +44,7 @@ export function route<const E extends Endpoint>(endpoint: E, handler: Handler<E>
       const query = parse(endpoint.query, queryOf(req), '/query');
       const body = endpoint.body && endpoint.access.kind !== 'telemetry-key' ? parse(endpoint.body, req.body, '') : req.body;
       const incoming = { params, query, body, req, res } as Incoming<E>;
-      send(endpoint, res, await handler(ctx, incoming));
+      send(services, endpoint, res, await handler(ctx, incoming));
     },
   };
 }
@@ -53,36 +55,39 @@ export function mountRoutes(router: Router, services: Services, routes: Route[])
   }
 }
 
-function contextFor(services: Services, { access }: Endpoint, req: Request): ProducerContext | PersonContext | Services {
-  if (access.kind === 'may') {
-    const ctx = producerContext(services, req);
-    if (!ctx.ability.can(access.action, access.subject)) throw problem('not-allowed');
-    return ctx;
-  }
+function contextFor(services: Services, endpoint: Endpoint, req: Request): ProducerContext | PersonContext | Services {
+  const { access } = endpoint;
+  if (access.kind !== 'may' && access.kind !== 'person') return services;
+  const { personId, handle } = signedIn(services, req);
+  const seen = seenBy(services, req);
+  refuseWhileSeeing(endpoint, seen);
   if (access.kind === 'person') {
-    const { personId, handle } = signedIn(services, req);
-    return { system: services.system, personId, sessionHandle: handle, now: services.now() };
+    return { system: services.system, personId: seen?.membership.personId ?? personId, seen, sessionHandle: handle, now: services.now() };
   }
-  return services;
+  const ctx = producerContext(services, personId, seen, String(req.params.producer));
+  if (!ctx.ability.can(access.action, access.subject)) throw problem('not-allowed');
+  return ctx;
 }
 
 /** The session proves a membership of the producer in the path; a stranger cannot tell a producer from nothing. */
-function producerContext(services: Services, req: Request): ProducerContext {
+function producerContext(services: Services, personId: string, seen: Seen | null, slug: string): ProducerContext {
   const { system, newId, newSecret, storage, config, db } = services;
-  const { personId } = signedIn(services, req);
-  const found = system.membershipsOf(personId).find(({ producer }) => producer.slug === req.params.producer);
-  if (!found) throw problem('not-found');
+  const found = seen ?? system.membershipAt(personId, slug);
+  if (found?.producer.slug !== slug) throw problem('not-found');
   const now = services.now();
   const { producer, membership } = found;
   const viewer = system.viewerOf(membership, now);
   const ability: Ability = abilityFor(viewer);
   const actor = { producerId: producer.id, id: membership.id, ability };
-  const { slug, name, timeZone, language, urgentPhone } = producer;
   return {
     db: producerDb(db, producer.id),
     viewer,
     ability,
-    producer: { slug, name, timeZone, language, urgentPhone },
+    producer: shown(producer),
+    readProducer: () => shown(system.producerById(producer.id) ?? producer),
+    get language() {
+      return system.activePerson(viewer.personId)?.language ?? producer.language;
+    },
     now,
     newId,
     newSecret,
@@ -91,6 +96,9 @@ function producerContext(services: Services, req: Request): ProducerContext {
     act: (act, work) => runAction(services, actor, act, now, work),
   };
 }
+
+/** Without its id, which a handler must not hold. */
+const shown = ({ id: _id, createdAt: _createdAt, ...producer }: Producer) => producer;
 
 /** A malformed name in the path is a place that does not exist. */
 function parseParams(endpoint: Endpoint, req: Request): unknown {
@@ -123,10 +131,15 @@ const escaped = (key: PropertyKey): string => String(key).replace(/~/g, '~0').re
 /** Faults written in the contract are keys; the library's own English never leaves the server. */
 const known = (message: string): string => (/^[a-z][a-z-]*$/.test(message) ? message : 'invalid');
 
-/** Only what the contract promises leaves the server. */
-function send(endpoint: Endpoint, res: Response, result: unknown): void {
+/** Only what the contract promises leaves the server; what was made as JSON is held against it outside production. */
+function send({ config }: Services, endpoint: Endpoint, res: Response, result: unknown): void {
   if (endpoint.answer === 'file' || res.headersSent) return;
   const status = endpoint.status ?? (endpoint.result ? 200 : 204);
+  if (result instanceof MadeJson) {
+    if (config.mode !== 'production') endpoint.result?.parse(JSON.parse(result.text));
+    res.status(status).setHeader('content-type', 'application/json; charset=utf-8').end(result.text);
+    return;
+  }
   if (endpoint.result) res.status(status).json(endpoint.result.parse(result));
   else res.status(status).end();
 }

@@ -1,7 +1,8 @@
 import { createHash } from 'node:crypto';
 import { row, type Ability } from '../contract/ability';
-import { auditEntries, desc, eq, outbox, producerDb } from '../db';
+import { auditEntries, desc, eq, memberships, outbox, producerDb, writeFleetRows, writeRiskLimit } from '../db';
 import { composeMail } from '../features/mail/compose';
+import { refreshState } from '../telemetry/refresh-state';
 import type { ActionTx, Services } from './context';
 import { problem } from './problem';
 
@@ -31,8 +32,20 @@ export function runAction<T>(services: Services, actor: Actor, name: string, now
       done.audited = true;
     },
     mail(message) {
-      const payload = JSON.stringify(composeMail(message, services.config.baseUrl));
+      const producer = services.system.producerById(actor.producerId);
+      const sender = { name: producer?.senderName ?? '', replyTo: producer?.replyTo ?? '' };
+      const payload = JSON.stringify({ ...composeMail(message, services.config.baseUrl), sender });
       db.insert(outbox).values({ id: newId(), kind: 'mail', payload, dueAt: now, createdAt: now }).run();
+    },
+    freezerChanged: (freezerId) => refreshState(db, scoped, freezerId),
+    listAnew: (part) => writeFleetRows(scoped, part),
+    changeProducer: (patch) => {
+      services.system.changeProducer(actor.producerId, patch);
+      if (patch.riskLimit !== undefined) writeRiskLimit(scoped, patch.riskLimit);
+    },
+    speak: (memberId, language) => {
+      const member = scoped.find(memberships, memberId);
+      if (member) services.system.setPerson(member.personId, { language });
     },
     personOf: (wanted) => services.system.personOf({ id: newId(), ...wanted }, now),
   };

@@ -1,7 +1,7 @@
 import { createHash, randomBytes } from 'node:crypto';
 import type { Request, RequestHandler } from 'express';
 import session, { Store, type SessionData } from 'express-session';
-import { eq, lt, sessions, type Database } from '../db';
+import { eq, lt, sessions, sql, type Database } from '../db';
 import type { Config } from '../config';
 import type { Services } from './context';
 import { problem } from './problem';
@@ -13,6 +13,8 @@ declare module 'express-session' {
     device?: string;
     startedAt?: number;
     staff?: boolean;
+    /** As the row said when the session was read. */
+    seenAt?: number;
   }
 }
 
@@ -30,19 +32,27 @@ export const hash = (value: string): string => createHash('sha256').update(value
 
 /** Sessions in SQLite: ids only as hashes, a person's own listable, limits by side. */
 class SqliteSessions extends Store {
+  /** Asked with every request, so built once. */
+  private readonly byId;
+
   constructor(
     private readonly db: Database,
     private readonly now: () => number,
   ) {
     super();
+    this.byId = db
+      .select({ data: sessions.data, seenAt: sessions.seenAt, expiresAt: sessions.expiresAt })
+      .from(sessions)
+      .where(eq(sessions.id, sql.placeholder('id')))
+      .prepare();
   }
 
   get = (sid: string, done: (error: unknown, data?: SessionData | null) => void): void => {
     attempt(done, () => {
-      const found = this.db.select().from(sessions).where(eq(sessions.id, hash(sid))).get();
+      const found = this.byId.get({ id: hash(sid) });
       if (!found || found.expiresAt <= this.now()) return null;
       // Written by `set` below and by nothing else.
-      return JSON.parse(found.data) as SessionData;
+      return { ...(JSON.parse(found.data) as SessionData), seenAt: found.seenAt };
     });
   };
 
@@ -50,7 +60,7 @@ class SqliteSessions extends Store {
     attempt(done, () => {
       const now = this.now();
       const { personId, handle = randomBytes(9).toString('base64url'), device = '', startedAt = now } = data;
-      const row = { data: JSON.stringify({ ...data, handle, startedAt }), seenAt: now, expiresAt: expiry(data, now) };
+      const row = { data: JSON.stringify({ ...data, seenAt: undefined, handle, startedAt }), seenAt: now, expiresAt: expiry(data, now) };
       this.db
         .insert(sessions)
         .values({ id: hash(sid), personId, handle, device, createdAt: startedAt, ...row })
@@ -63,8 +73,7 @@ class SqliteSessions extends Store {
   override touch = (sid: string, data: SessionData, done: () => void = () => {}): void => {
     attempt(done, () => {
       const now = this.now();
-      const found = this.db.select({ seenAt: sessions.seenAt }).from(sessions).where(eq(sessions.id, hash(sid))).get();
-      if (!found || now - found.seenAt < TOUCH_EVERY) return;
+      if (now - (data.seenAt ?? now) < TOUCH_EVERY) return;
       this.db.update(sessions).set({ seenAt: now, expiresAt: expiry(data, now) }).where(eq(sessions.id, hash(sid))).run();
     });
   };

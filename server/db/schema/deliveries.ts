@@ -72,6 +72,8 @@ export const deliveryLines = sqliteTable(
     ownedRef(t, t.freezerId, freezers),
     ownedRef(t, t.productId, products),
     index('delivery_line_delivery').on(t.producerId, t.deliveryId),
+    index('delivery_line_freezer').on(t.producerId, t.freezerId),
+    index('delivery_line_product').on(t.producerId, t.productId),
     index('delivery_line_lot').on(t.producerId, t.lot),
   ],
 );

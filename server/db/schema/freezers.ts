@@ -10,6 +10,7 @@ export const products = sqliteTable(
     name: text().notNull(),
     bagPounds: real().notNull(),
     gtin: text(),
+    version: integer().notNull().default(1),
     retiredAt: integer(),
     createdAt: integer().notNull(),
   },
@@ -27,6 +28,8 @@ export const models = sqliteTable(
     doors: integer().notNull(),
     ratedPounds: real().notNull(),
     defrost: text().$type<Defrost>().notNull(),
+    version: integer().notNull().default(1),
+    retiredAt: integer(),
     createdAt: integer().notNull(),
   },
   (t) => [ownedKey(t), uniqueIndex('model_name').on(t.producerId, t.name)],
@@ -46,6 +49,7 @@ export const freezers = sqliteTable(
     rackIn: real().notNull(),
     headroomIn: real().notNull(),
     position: integer().notNull().default(0),
+    version: integer().notNull().default(1),
     retiredAt: integer(),
     createdAt: integer().notNull(),
   },
@@ -55,6 +59,7 @@ export const freezers = sqliteTable(
     ownedRef(t, t.modelId, models),
     uniqueIndex('freezer_asset').on(t.producerId, t.assetNumber),
     index('freezer_store').on(t.producerId, t.storeId, t.position),
+    index('freezer_model').on(t.producerId, t.modelId),
   ],
 );
 
@@ -72,5 +77,6 @@ export const lanes = sqliteTable(
     ownedRef(t, t.freezerId, freezers),
     ownedRef(t, t.productId, products),
     uniqueIndex('lane_position').on(t.producerId, t.freezerId, t.position),
+    index('lane_product').on(t.producerId, t.productId),
   ],
 );

@@ -1,4 +1,5 @@
 export * from './deliveries';
+export * from './fleet';
 export * from './freezers';
 export * from './people';
 export * from './producers';

@@ -1,5 +1,5 @@
-import { sqliteTable, text, integer } from 'drizzle-orm/sqlite-core';
-import type { Language } from '../../contract/words';
+import { integer, real, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+import type { Language, Span } from '../../contract/words';
 
 /** The tenants. Not owned: this is what owns. */
 export const producers = sqliteTable('producer', {
@@ -9,5 +9,21 @@ export const producers = sqliteTable('producer', {
   timeZone: text().notNull(),
   language: text().$type<Language>().notNull(),
   urgentPhone: text().notNull(),
+  /** Name in the storage of the picture shown beside the producer's name. */
+  logo: text(),
+  serviceHours: text({ mode: 'json' }).$type<Span[]>().notNull().default([]),
+  holidays: text({ mode: 'json' }).$type<Holiday[]>().notNull().default([]),
+  /** The chance of being empty before the truck from which a freezer counts as at risk. */
+  riskLimit: real().notNull().default(0.1),
+  /** Who mail says it is from, and where answers go; empty is the installation's own. */
+  senderName: text().notNull().default(''),
+  replyTo: text().notNull().default(''),
+  version: integer().notNull().default(1),
   createdAt: integer().notNull(),
 });
+
+/** A local day on which the service desk is closed. */
+export interface Holiday {
+  day: string;
+  name: string;
+}

@@ -36,6 +36,7 @@ export const requests = sqliteTable(
     index('request_opened').on(t.producerId, t.openedAt, t.id),
     index('request_state').on(t.producerId, t.state, t.openedAt, t.id),
     index('request_store').on(t.producerId, t.storeId, t.openedAt, t.id),
+    index('request_freezer').on(t.producerId, t.freezerId, t.openedAt, t.id),
     index('request_assignee').on(t.producerId, t.assigneeId, t.openedAt, t.id),
   ],
 );

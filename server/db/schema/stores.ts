@@ -1,5 +1,5 @@
 import { index, integer, real, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core';
-import type { Language, Span, Weekday } from '../../contract/words';
+import type { Language, Span, StoreKind, Weekday } from '../../contract/words';
 import { owned, ownedKey, ownedRef } from './owned';
 
 export const accounts = sqliteTable(
@@ -10,15 +10,25 @@ export const accounts = sqliteTable(
     name: text().notNull(),
     terms: text().notNull().default(''),
     language: text().$type<Language>().notNull(),
+    contacts: text({ mode: 'json' }).$type<Contact[]>().notNull().default([]),
+    version: integer().notNull().default(1),
     retiredAt: integer(),
     createdAt: integer().notNull(),
   },
-  (t) => [ownedKey(t), uniqueIndex('account_number').on(t.producerId, t.number)],
+  (t) => [ownedKey(t), uniqueIndex('account_number').on(t.producerId, t.number), index('account_name').on(t.producerId, t.name, t.id)],
 );
+
+/** Somebody at an account, who need not use the portal. */
+export interface Contact {
+  name: string;
+  work: string;
+  email: string;
+  phone: string;
+}
 
 export const districts = sqliteTable(
   'district',
-  { ...owned(), name: text().notNull(), retiredAt: integer(), createdAt: integer().notNull() },
+  { ...owned(), name: text().notNull(), version: integer().notNull().default(1), retiredAt: integer(), createdAt: integer().notNull() },
   (t) => [ownedKey(t), uniqueIndex('district_name').on(t.producerId, t.name)],
 );
 
@@ -29,7 +39,7 @@ export const stores = sqliteTable(
     accountId: text().notNull(),
     districtId: text().notNull(),
     name: text().notNull(),
-    kind: text().notNull(),
+    kind: text().$type<StoreKind>().notNull(),
     street: text().notNull(),
     city: text().notNull(),
     region: text().notNull(),
@@ -39,10 +49,13 @@ export const stores = sqliteTable(
     timeZone: text().notNull(),
     language: text().$type<Language>().notNull(),
     phone: text().notNull(),
+    /** Empty is the producer's own. */
+    urgentPhone: text().notNull().default(''),
     openHours: text({ mode: 'json' }).$type<[number, number]>().notNull(),
     receivingHours: text({ mode: 'json' }).$type<Span[]>().notNull(),
     deliveryDays: text({ mode: 'json' }).$type<Weekday[]>().notNull(),
     driverNotes: text().notNull().default(''),
+    version: integer().notNull().default(1),
     retiredAt: integer(),
     createdAt: integer().notNull(),
   },

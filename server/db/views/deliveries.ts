@@ -7,11 +7,20 @@ type Place = readonly [at: number, id: string];
 
 /** A store's deliveries, youngest first, from behind `after`. */
 export const deliveriesOfStore = (db: ProducerDb, storeId: string, after: Place | null, limit: number): Delivery[] =>
-  deliveriesView(db, sql`d.store_id = ${storeId} and ${after ? sql`(d.at, d.id) < (${after[0]}, ${after[1]})` : sql`1`}`, limit);
+  deliveriesView(db, () => sql`d.store_id = ${storeId} and ${after ? sql`(d.at, d.id) < (${after[0]}, ${after[1]})` : sql`1`}`, limit);
 
-export const deliveryView = (db: ProducerDb, id: string): Delivery | undefined => deliveriesView(db, sql`d.id = ${id}`, 1)[0];
+/** The last of a store that left something in this freezer, or did not say in which. */
+export const deliveriesOfFreezer = (db: ProducerDb, { id, storeId }: { id: string; storeId: string }, limit: number): Delivery[] =>
+  deliveriesView(
+    db,
+    (producer) => sql`d.store_id = ${storeId} and exists (select 1 from ${deliveryLines} l
+      where l.producer_id = ${producer} and l.delivery_id = d.id and (l.freezer_id = ${id} or l.freezer_id is null))`,
+    limit,
+  );
 
-function deliveriesView(db: ProducerDb, where: SQL, limit: number): Delivery[] {
+export const deliveryView = (db: ProducerDb, id: string): Delivery | undefined => deliveriesView(db, () => sql`d.id = ${id}`, 1)[0];
+
+function deliveriesView(db: ProducerDb, where: (producer: string) => SQL, limit: number): Delivery[] {
   const rows = db.view<Omit<Delivery, 'lines'> & { lines: string }>(
     (producer) => sql`
     select d.id, d.at, d.told_from as "toldFrom", d.told_to as "toldTo",
@@ -21,7 +30,7 @@ function deliveriesView(db: ProducerDb, where: SQL, limit: number): Delivery[] {
         from ${deliveryLines} l join ${products} p on p.producer_id = ${producer} and p.id = l.product_id
         where l.producer_id = ${producer} and l.delivery_id = d.id) as lines
     from ${deliveries} d
-    where d.producer_id = ${producer} and ${where}
+    where d.producer_id = ${producer} and ${where(producer)}
     order by d.at desc, d.id desc limit ${limit}`,
   );
   return rows.map((row) => ({ ...row, lines: JSON.parse(row.lines) }));

@@ -39,9 +39,9 @@ export const managersOfStore = (db: ProducerDb, storeId: string): MemberRow[] =>
 
 /** Somebody who works with this producer, with what they are assigned; `where` speaks of `m` and `p`. */
 export function peopleView(db: ProducerDb, where: SQL, limit: number): MemberOf[] {
-  const rows = db.view<Omit<MemberOf, 'scopes' | 'active'> & { scopes: string; active: number }>(
+  const rows = db.view<Omit<MemberOf, 'scopes' | 'grants' | 'active'> & { scopes: string; grants: string; active: number }>(
     (producer) => sql`
-    select m.id, p.name, p.email, p.language, m.role, m.side,
+    select m.id, p.name, p.email, p.language, m.role, m.side, m.grants,
       m.deactivated_at is null and p.deactivated_at is null as active,
       (select json_group_array(json_object(
           'kind', case when c.store_id is not null then 'store' when c.district_id is not null then 'district' else 'account' end,
@@ -55,5 +55,5 @@ export function peopleView(db: ProducerDb, where: SQL, limit: number): MemberOf[
     where m.producer_id = ${producer} and ${where}
     order by p.name, m.id limit ${limit}`,
   );
-  return rows.map((row) => ({ ...row, scopes: JSON.parse(row.scopes), active: row.active === 1 }));
+  return rows.map((row) => ({ ...row, scopes: JSON.parse(row.scopes), grants: JSON.parse(row.grants), active: row.active === 1 }));
 }

@@ -1,7 +1,10 @@
 import { sql } from 'drizzle-orm';
+import type { Result } from '../../contract/endpoint';
+import type { findSensors } from '../../contract/sensors';
 import type { QuarantineReason } from '../../contract/telemetry';
+import { contains } from '../contains';
 import type { ProducerDb } from '../producer-db';
-import { installs, quarantinedReadings, readings, sensors } from '../schema';
+import { freezers, installs, quarantinedReadings, readings, sensors, stores } from '../schema';
 
 export interface UnclaimedRow {
   id: string;
@@ -21,6 +24,29 @@ export const unclaimedSensors = (db: ProducerDb, after: string | null, limit: nu
       and not exists (select 1 from ${installs} i where i.producer_id = ${producer} and i.sensor_id = s.id and i."to" is null)
     order by s.serial limit ${limit}`,
   );
+
+type FoundSensor = Result<typeof findSensors>['sensors'][number];
+
+/** Sensors whose serial contains the words, in whatever freezer, the unclaimed first. */
+export function sensorsFound(db: ProducerDb, words: string, limit: number): FoundSensor[] {
+  const rows = db.view<Omit<FoundSensor, 'freezer'> & { freezer: string | null }>(
+    (producer) => sql`
+    select ${sensors.id} as id, ${sensors.serial} as serial,
+      (select max(r.at) from ${readings} r where r.sensor_no = ${sensors.no}) as "lastReadingAt",
+      coalesce((select json_array_length(r.probes) from ${readings} r
+        where r.sensor_no = ${sensors.no} order by r.at desc limit 1), 0) as probes,
+      (select json_object('id', f.id, 'name', f.name, 'store', s.name)
+        from ${installs} i
+        join ${freezers} f on f.producer_id = ${producer} and f.id = i.freezer_id
+        join ${stores} s on s.producer_id = ${producer} and s.id = f.store_id
+        where i.producer_id = ${producer} and i.sensor_id = ${sensors.id} and i."to" is null limit 1) as freezer
+    from ${sensors}
+    where ${sensors.producerId} = ${producer} and ${contains(words, sensors.serial)}
+    order by freezer is not null, ${sensors.serial} limit ${limit}`,
+  );
+  // Built by the statement above.
+  return rows.map((row) => ({ ...row, freezer: row.freezer === null ? null : (JSON.parse(row.freezer) as FoundSensor['freezer']) }));
+}
 
 export interface QuarantinedRow {
   id: string;

@@ -38,20 +38,27 @@ export function storesView(db: ProducerDb, where: SQL, readable: SQL, limit: num
       (select json_group_array(json_object(
           'at', st.at, 'share', st.share, 'pounds', st.pounds, 'capacityPounds', st.capacity_pounds,
           'warmSince', st.warm_since, 'runOutLikely', st.run_out_likely,
-          'sensor', json(case when exists (select 1 from ${installs} i
-            where i.producer_id = ${producer} and i.freezer_id = f.id and i."to" is null) then 'true' else 'false' end)))
+          'sensor', json(case when ${hasSensor(producer)} then 'true' else 'false' end)))
         from ${freezers} f
         left join ${freezerStates} st on st.producer_id = ${producer} and st.id = f.id
         where f.producer_id = ${producer} and f.store_id = ${stores.id} and f.retired_at is null) as freezers
+    ${fromStores(producer, where, limit)}`,
+  );
+  return rows.map((row) => ({ ...row, freezers: JSON.parse(row.freezers) }));
+}
+
+/** Stores by name, each with its district, its account and its next truck. */
+export const fromStores = (producer: string, where: SQL, limit: number): SQL => sql`
     from ${stores}
     join ${districts} on ${districts.producerId} = ${producer} and ${districts.id} = ${stores.districtId}
     join ${accounts} on ${accounts.producerId} = ${producer} and ${accounts.id} = ${stores.accountId}
     left join ${nextTrucks} on ${nextTrucks.producerId} = ${producer} and ${nextTrucks.storeId} = ${stores.id}
-    where ${stores.producerId} = ${producer} and ${stores.retiredAt} is null and ${where}
-    order by ${stores.name}, ${stores.id} limit ${limit}`,
-  );
-  return rows.map((row) => ({ ...row, freezers: JSON.parse(row.freezers) }));
-}
+    where ${stores.producerId} = ${producer} and ${where}
+    order by ${stores.name}, ${stores.id} limit ${limit}`;
+
+/** Of the freezer `f` of a statement. */
+export const hasSensor = (producer: string): SQL => sql`exists (select 1 from ${installs} i
+    where i.producer_id = ${producer} and i.freezer_id = f.id and i."to" is null)`;
 
 export const hasTruck = (condition: SQL): SQL => sql`${nextTrucks.id} is not null and ${condition}`;
 export const noTruck: SQL = sql`${nextTrucks.id} is null`;
@@ -70,6 +77,7 @@ export const storeView = (db: ProducerDb, ability: Ability, storeId: string) =>
       timeZone: stores.timeZone,
       language: stores.language,
       phone: stores.phone,
+      urgentPhone: stores.urgentPhone,
       account: accounts.name,
       district: districts.name,
       deliveryDays: stores.deliveryDays,

@@ -1,4 +1,4 @@
-import type { Defrost, Language, Role, Side } from '../../contract/words';
+import type { Defrost, Language, Role, Side, Span } from '../../contract/words';
 
 /** The invented world. Mail ends in `.example`, telephone numbers are 555-01xx. */
 
@@ -29,8 +29,14 @@ export interface DemoProducer {
   name: string;
   language: Language;
   urgentPhone: string;
+  /** Of stores that have somebody nearer to call, by name. */
+  urgentPhones: Record<string, string>;
+  serviceHours: Span[];
+  mailSender: { name: string; replyTo: string };
   serialPrefix: string;
   lotPrefix: string;
+  /** Seven digits; 952 is what GS1 keeps for examples. */
+  gtinPrefix: string;
   region: string;
   /** South-west and north-east corners of where its stores stand. */
   area: [latitude: number, longitude: number][];
@@ -66,8 +72,15 @@ export const kestrelBend: DemoProducer = {
   name: 'Kestrel Bend Ice',
   language: 'en',
   urgentPhone: '(417) 555-0100',
+  urgentPhones: { 'Juniper Fuel & Bait': '(870) 555-0145', 'Ozark Lane Grocery': '(417) 555-0134' },
+  serviceHours: [
+    { days: [1, 2, 3, 4, 5], from: '06:00', to: '18:00' },
+    { days: [6], from: '07:00', to: '13:00' },
+  ],
+  mailSender: { name: 'Kestrel Bend Ice', replyTo: 'service@kestrelbend.example' },
   serialPrefix: 'urn:dev:os:32473-kb-',
   lotPrefix: 'KB',
+  gtinPrefix: '9524170',
   region: 'AR',
   area: [[35.75, -94.2], [36.45, -92.3]],
   districts: ['North of the river', 'South of the river', 'Lakeside'],
@@ -126,8 +139,12 @@ export const puertoClaro: DemoProducer = {
   name: 'Hielo Puerto Claro',
   language: 'es',
   urgentPhone: '(361) 555-0160',
+  urgentPhones: { 'La Gaviota 3': '(361) 555-0173', 'Sandbar Fuel': '(361) 555-0184' },
+  serviceHours: [{ days: [1, 2, 3, 4, 5, 6], from: '06:00', to: '17:00' }],
+  mailSender: { name: 'Hielo Puerto Claro', replyTo: 'servicio@puertoclaro.example' },
   serialPrefix: 'urn:dev:os:32473-pc-',
   lotPrefix: 'PC',
+  gtinPrefix: '9523610',
   region: 'TX',
   area: [[27.55, -97.85], [28.35, -97.0]],
   districts: ['Bahía', 'Tierra adentro'],

@@ -3,6 +3,7 @@ import type { Request } from 'express';
 import { api } from '../../contract';
 import { limit } from '../../http/limits';
 import { route } from '../../http/route';
+import { seenBy, stopSeeing } from '../../http/seeing';
 import { endOwnSession, startSession, whoIs } from '../../http/session';
 import { presentMe } from '../me/present';
 import type { MagicLink } from './magic-link';
@@ -36,7 +37,19 @@ export const authRoutes = (links: MagicLink) => [
 
   route(api.auth.readSession, (services, { req }) => {
     const found = whoIs(services, req);
-    return { me: found && presentMe(services.system, found.personId, services.now()) };
+    const seen = found && seenBy(services, req);
+    return { me: found && presentMe(services.system, seen?.membership.personId ?? found.personId, services.now(), seen?.producer.id) };
+  }),
+
+  route(api.auth.readSeeing, (services, { req }) => {
+    const seen = whoIs(services, req) && seenBy(services, req);
+    const person = seen && services.system.activePerson(seen.membership.personId);
+    return { seeing: seen && person ? { producer: seen.producer.slug, memberId: seen.memberId, name: person.name, until: seen.until } : null };
+  }),
+
+  route(api.auth.endSeeing, (_ctx, { req }) => {
+    stopSeeing(req);
+    return undefined;
   }),
 
   route(api.auth.signOut, async (_ctx, { req }) => {

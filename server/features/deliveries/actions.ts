@@ -7,49 +7,37 @@ import {
   freezers,
   inArray,
   nextTruckLoads,
-  nextTrucks,
   products,
   type ProducerDb,
 } from '../../db';
-import { dayOf, instantOf, startOfDay } from '../../domain/civil';
-import type { ActionTx, ProducerContext } from '../../http/context';
-import { problem } from '../../http/problem';
-
-interface StorePlace {
-  id: string;
-  timeZone: string;
-}
+import { startOfDay } from '../../domain/civil';
+import type { ProducerContext } from '../../http/context';
+import { orNotFound, problem } from '../../http/problem';
+import { removeTruck, toldWindow, truckOf, writeTruck, type StorePlace } from '../trucks/write-truck';
 
 /** Tells a store when its next truck comes; whoever saw another version is told so first. */
 export function setNextTruck({ act, now, newId }: ProducerContext, store: StorePlace, body: Body<typeof setEndpoint>): void {
-  const { day, load } = body;
-  if (day < dayOf(now, store.timeZone)) throw problem('day-past');
-  const from = instantOf(day, body.from, store.timeZone);
-  const to = instantOf(day, body.to, store.timeZone);
-  if (to <= from) throw problem('window-backwards');
+  const { load } = body;
+  const told = toldWindow(body, store, now);
+  if (typeof told === 'string') throw problem(told);
 
   act('set-next-truck', (tx) => {
     tx.authorise('update', 'NextTruck', { storeId: store.id });
-    const known = truckOf(tx.db, store.id);
-    if ((known?.version ?? null) !== body.version) throw problem('truck-changed');
+    const id = writeTruck(tx, { now, newId }, store.id, told, body.version);
     knownProducts(tx.db, load.map(({ productId }) => productId));
-    const row = { day, from, to, version: (known?.version ?? 0) + 1, updatedAt: now };
-    const id = known?.id ?? newId();
-    tx.db.upsert(nextTrucks, { id, storeId: store.id, ...row }, row);
     tx.db.delete(nextTruckLoads, eq(nextTruckLoads.nextTruckId, id));
     for (const { productId, bags } of summed(load)) {
       tx.db.insert(nextTruckLoads, { id: newId(), nextTruckId: id, productId, bags });
     }
-    tx.audit('NextTruck', id, { storeId: store.id, day, from, to, load });
+    tx.audit('NextTruck', id, { storeId: store.id, ...told, load });
   });
 }
 
 export function clearNextTruck({ act }: ProducerContext, store: StorePlace): void {
   act('clear-next-truck', (tx) => {
     tx.authorise('delete', 'NextTruck', { storeId: store.id });
-    const known = truckOf(tx.db, store.id);
-    if (!known) throw problem('not-found');
-    removeTruck(tx, known.id);
+    const known = orNotFound(truckOf(tx.db, store.id));
+    removeTruck(tx, known);
     tx.audit('NextTruck', known.id, { storeId: store.id, cleared: true });
   });
 }
@@ -76,22 +64,10 @@ export function recordDelivery({ act, now, newId, viewer }: ProducerContext, sto
       createdAt: now,
     });
     for (const line of lines) tx.db.insert(deliveryLines, { id: newId(), deliveryId: id, ...line });
-    if (came) removeTruck(tx, came.id);
+    if (came) removeTruck(tx, came);
     tx.audit('Delivery', id, { storeId: store.id, at, lines });
     return id;
   });
-}
-
-const truckOf = (db: ProducerDb, storeId: string) =>
-  db
-    .select({ id: nextTrucks.id, version: nextTrucks.version, day: nextTrucks.day, from: nextTrucks.from, to: nextTrucks.to })
-    .from(nextTrucks)
-    .where(eq(nextTrucks.storeId, storeId))
-    .get();
-
-function removeTruck({ db }: ActionTx, id: string): void {
-  db.delete(nextTruckLoads, eq(nextTruckLoads.nextTruckId, id));
-  db.delete(nextTrucks, eq(nextTrucks.id, id));
 }
 
 function knownProducts(db: ProducerDb, ids: string[]): void {

@@ -1,9 +1,8 @@
 import { api } from '../../contract';
-import { isNull, products } from '../../db';
 import { deliveriesOfStore, deliveryView, nextTruckOfStore } from '../../db/views/deliveries';
 import { storeView } from '../../db/views/stores';
 import type { ProducerContext } from '../../http/context';
-import { problem } from '../../http/problem';
+import { orNotFound } from '../../http/problem';
 import { route } from '../../http/route';
 import { pageOf, readCursor } from '../cursor';
 import { clearNextTruck, recordDelivery, setNextTruck } from './actions';
@@ -33,21 +32,10 @@ export const deliveriesRoutes = [
     const id = recordDelivery(ctx, storeOf(ctx, params.storeId), body);
     return present(deliveryView(ctx.db, id));
   }),
-
-  route(api.products.list, ({ db }) => ({
-    products: db
-      .select({ id: products.id, name: products.name, bagPounds: products.bagPounds })
-      .from(products)
-      .where(isNull(products.retiredAt))
-      .orderBy(products.bagPounds, products.name)
-      .all(),
-  })),
 ];
 
 function storeOf({ db, ability }: ProducerContext, storeId: string) {
-  const store = storeView(db, ability, storeId);
-  if (!store) throw problem('not-found');
-  return store;
+  return orNotFound(storeView(db, ability, storeId));
 }
 
 function present<T>(row: T | null | undefined): T {

@@ -2,7 +2,7 @@ import express, { type Response } from 'express';
 import { api } from '../../contract';
 import type { Mode } from '../../config';
 import { desc, localMails, type Database } from '../../db';
-import { problem } from '../../http/problem';
+import { orNotFound } from '../../http/problem';
 import { route } from '../../http/route';
 import { startSession } from '../../http/session';
 import { escape } from '../mail/compose';
@@ -25,8 +25,7 @@ export const devRoutes = [
   }),
 
   route(api.dev.mailOne, ({ db }, { params, res }) => {
-    const mail = mails(db).find(({ id }) => id === params.mailId);
-    if (!mail) throw problem('not-found');
+    const mail = orNotFound(mails(db).find(({ id }) => id === params.mailId));
     const text = escape(mail.text).replace(/https?:\/\/[^\s<]+/g, (link) => `<a href="${link}">${link}</a>`);
     return page(res, mail.subject, `<p>${escape(mail.to)}</p><pre>${text}</pre><p><a href="/dev/mail">Local mail</a></p>`);
   }),
@@ -43,8 +42,7 @@ export const devRoutes = [
   route(
     api.dev.signIn,
     async (services, { body, req, res }) => {
-      const person = services.system.personByEmail(body.email);
-      if (!person) throw problem('not-found');
+      const person = orNotFound(services.system.personByEmail(body.email));
       await startSession(services, req, person.id);
       res.redirect(303, '/');
       return undefined;

@@ -1,29 +1,46 @@
 import { api } from '../../contract';
-import { allowed, and, freezers, sql, stores } from '../../db';
-import { freezersView } from '../../db/views/freezers';
-import { problem } from '../../http/problem';
+import type { Query } from '../../contract/endpoint';
+import type { mapFreezers } from '../../contract/fleet';
+import { allowed, fleetRows } from '../../db';
+import { fleetDigest, fleetMap, fleetView, placed, type FleetSelection } from '../../db/views/fleet';
+import { dayOf } from '../../domain/civil';
+import type { ProducerContext } from '../../http/context';
+import { sendCsv } from '../../http/csv';
+import { madeJson } from '../../http/made-json';
 import { route } from '../../http/route';
 import { pageOf, readCursor } from '../cursor';
-
-const columns = { id: freezers.id, storeId: freezers.storeId };
+import { fleetTable } from './fleet-table';
 
 export const freezersRoutes = [
-  route(api.freezers.list, ({ db, ability }, { query }) => {
+  route(api.freezers.list, (ctx, { query }) => {
     const limit = query.limit ?? 50;
-    const cursor = readCursor(query.after, ['string', 'string']);
-    const where = and(
-      allowed(ability, 'read', 'Freezer', columns),
-      cursor ? sql`(${stores.name}, ${freezers.id}) > (${cursor[0]}, ${cursor[1]})` : undefined,
-    );
-    const rows = freezersView(db, where ?? sql`1`, sql`${stores.name}, ${freezers.id}`, limit + 1);
-    const page = pageOf(rows, limit, (row) => [row.store, row.id]);
-    return { freezers: page.rows, next: page.next };
+    const cursor = readCursor(query.after, ['number', 'string']);
+    const after = cursor ? ([Number(cursor[0]), String(cursor[1])] as const) : null;
+    const page = pageOf(fleetView(ctx.db, selectionOf(ctx, query), after, limit + 1), limit, (json) => [...placed(json).place]);
+    return madeJson(`{"freezers":[${page.rows.join(',')}],"next":${JSON.stringify(page.next)}}`);
   }),
 
-  route(api.freezers.read, ({ db, ability }, { params }) => {
-    const where = and(sql`${freezers.id} = ${params.freezerId}`, allowed(ability, 'read', 'Freezer', columns));
-    const [found] = freezersView(db, where ?? sql`0`, sql`${freezers.id}`, 1);
-    if (!found) throw problem('not-found');
-    return found;
+  route(api.freezers.digest, (ctx, { query }) => fleetDigest(ctx.db, selectionOf(ctx, query))),
+
+  route(api.freezers.csv, async (ctx, { query, res }) => {
+    const { producer, now } = ctx;
+    await sendCsv(res, `${producer.slug}-freezers-${dayOf(now, producer.timeZone)}.csv`, fleetTable(ctx, selectionOf(ctx, query), query.columns));
+    return undefined;
   }),
+
+  route(api.freezers.map, (ctx, { query }) => ({ stores: fleetMap(ctx.db, selectionOf(ctx, query)) })),
 ];
+
+/** What of the fleet this viewer asks for, within what they may see. */
+export function selectionOf({ ability, now }: ProducerContext, { q, district, account, store, show }: Query<typeof mapFreezers>): FleetSelection {
+  return {
+    visible: allowed(ability, 'read', 'Freezer', { id: fleetRows.id, storeId: fleetRows.storeId }),
+    narrow: ability.rulesFor('read', 'Freezer').every(({ conditions }) => conditions !== undefined),
+    q,
+    district,
+    account,
+    store,
+    show,
+    now,
+  };
+}

@@ -4,15 +4,16 @@ import { route } from '../../http/route';
 import { presentMe } from './present';
 
 export const meRoutes = [
-  route(api.me.read, ({ system, personId, now }) => presentMe(system, personId, now)),
+  route(api.me.read, ({ system, personId, seen, now }) => presentMe(system, personId, now, seen?.producer.id)),
 
   route(api.me.update, ({ system, personId }, { body }) => {
     system.setPerson(personId, body);
     return undefined;
   }),
 
-  route(api.me.sessions, ({ system, personId, sessionHandle, now }) => ({
-    sessions: system.sessionsOf(personId, now).map(({ handle, device, createdAt, seenAt }) => ({
+  // Where somebody is signed in is theirs alone.
+  route(api.me.sessions, ({ system, personId, seen, sessionHandle, now }) => ({
+    sessions: seen ? [] : system.sessionsOf(personId, now).map(({ handle, device, createdAt, seenAt }) => ({
       handle,
       device,
       createdAt,

@@ -1,26 +1,28 @@
 import type { Body } from '../../contract/endpoint';
 import { scopedRoles, type changePerson as changeEndpoint, type invitePerson as inviteEndpoint, type MemberOf } from '../../contract/people';
-import { liveStates, type Role, type Side } from '../../contract/words';
+import { abilityFor, actions, subjects } from '../../contract/ability';
+import { liveStates, type Grant, type Role, type Side } from '../../contract/words';
 import { accounts, and, districts, eq, inArray, memberships, membershipScopes, requests, sql, stores, type ProducerDb } from '../../db';
 import { membersByRole, peopleView } from '../../db/views/people';
 import type { ActionTx, ProducerContext } from '../../http/context';
-import { problem } from '../../http/problem';
+import { orNotFound, problem } from '../../http/problem';
 
 type Scopes = Body<typeof inviteEndpoint>['scopes'];
 
 /** Adds somebody to the producer and writes to them. Answers the membership's id. */
 export function invitePerson(ctx: ProducerContext, body: Body<typeof inviteEndpoint>): string {
-  const { email, name, language, role, scopes } = body;
+  const { email, name, language, role, scopes, grants } = body;
   return ctx.act('invite-person', (tx) => {
     tx.authorise('create', 'Person', {});
+    refuseBeyond(ctx, role, grants);
     refuseUnscoped(role, scopes);
     const personId = tx.personOf({ email, name, language });
     const known = tx.db.select({ id: memberships.id }).from(memberships).where(eq(memberships.personId, personId)).get();
     if (known) throw problem('already-member');
     const id = ctx.newId();
-    tx.db.insert(memberships, { id, personId, role, side: sideOf(role, body.side), createdAt: ctx.now });
+    tx.db.insert(memberships, { id, personId, role, side: sideOf(role, body.side), grants, createdAt: ctx.now });
     assign(ctx, tx, id, role, scopes);
-    tx.audit('Person', id, { role, scopes });
+    tx.audit('Person', id, { role, scopes, grants });
     invite(ctx, tx, id);
     return id;
   });
@@ -43,25 +45,42 @@ export function changePerson(ctx: ProducerContext, id: string, change: Body<type
     tx.authorise('update', 'Person', { id });
     const role = change.role ?? member.role;
     const active = change.active ?? member.active;
+    const grants = change.grants ?? member.grants;
     const scopes = change.scopes ?? member.scopes.map(({ kind, id: place }) => ({ kind, id: place }));
     if (member.role === 'producer-admin' && member.active && (role !== 'producer-admin' || !active)) refuseLastAdmin(tx.db);
+    refuseBeyond(ctx, role, grants);
     refuseUnscoped(role, scopes);
     tx.db.update(memberships, id, {
       role,
       side: sideOf(role, change.side ?? member.side),
+      grants,
       deactivatedAt: active ? null : ctx.now,
     });
     tx.db.delete(membershipScopes, eq(membershipScopes.membershipId, id));
     assign(ctx, tx, id, role, scopes);
     if (!active && member.active) handOver(ctx, tx, id, change.handOverTo);
-    tx.audit('Person', id, { role, active, scopes, handOverTo: change.handOverTo });
+    if (change.language) tx.speak(id, change.language);
+    tx.audit('Person', id, { role, active, scopes, grants, language: change.language, handOverTo: change.handOverTo });
   });
 }
 
-export function memberOf(db: ProducerDb, id: string): MemberOf {
-  const [member] = peopleView(db, sql`m.id = ${id}`, 1);
-  if (!member) throw problem('not-found');
-  return member;
+/** Who looks as somebody else is written down before they see anything. */
+export function seeAs({ act, viewer }: ProducerContext, id: string): void {
+  act('see-as', (tx) => {
+    const member = memberOf(tx.db, id);
+    tx.authorise('update', 'Person', { id });
+    if (!member.active || id === viewer.membershipId) throw problem('not-found');
+    tx.audit('Person', id, { seen: true });
+  });
+}
+
+export const memberOf = (db: ProducerDb, id: string): MemberOf => orNotFound(peopleView(db, sql`m.id = ${id}`, 1)[0]);
+
+/** Nobody gives what they lack: every rule of the new membership must be one of the giver's own. */
+export function refuseBeyond({ ability }: Pick<ProducerContext, 'ability'>, role: Role, grants: Grant[]): void {
+  const given = abilityFor({ personId: '', membershipId: '', role, side: sideOf(role, 'producer'), storeIds: [], grants });
+  const lacking = subjects.some((subject) => actions.some((action) => given.can(action, subject) && !ability.can(action, subject)));
+  if (lacking) throw problem('not-allowed');
 }
 
 const isScoped = (role: Role): boolean => scopedRoles.some((scoped) => scoped === role);

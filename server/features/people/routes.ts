@@ -1,9 +1,10 @@
 import { api } from '../../contract';
-import { accounts, and, contains, districts, isNull, sql } from '../../db';
+import { accounts, and, contains, districts, isNull, sql, type ProducerDb } from '../../db';
 import { peopleView } from '../../db/views/people';
+import { beginSeeing } from '../../http/seeing';
 import { route } from '../../http/route';
 import { pageOf, readCursor } from '../cursor';
-import { changePerson, inviteAgain, invitePerson, memberOf } from './actions';
+import { changePerson, inviteAgain, invitePerson, memberOf, seeAs } from './actions';
 
 export const peopleRoutes = [
   route(api.people.list, ({ db }, { query }) => {
@@ -30,13 +31,22 @@ export const peopleRoutes = [
     return undefined;
   }),
 
-  route(api.people.places, ({ db }) => ({
+  route(api.people.seeAs, (ctx, { params, req }) => {
+    seeAs(ctx, params.memberId);
+    beginSeeing(req, ctx.producer.slug, params.memberId, ctx.now);
+    return undefined;
+  }),
+
+  route(api.people.places, ({ db, ability }) => ({
     districts: db.select({ id: districts.id, name: districts.name }).from(districts).where(isNull(districts.retiredAt)).orderBy(districts.name).all(),
-    accounts: db
-      .select({ id: accounts.id, number: accounts.number, name: accounts.name })
-      .from(accounts)
-      .where(isNull(accounts.retiredAt))
-      .orderBy(accounts.name)
-      .all(),
+    accounts: ability.can('read', 'Account') ? accountsInUse(db) : [],
   })),
 ];
+
+const accountsInUse = (db: ProducerDb) =>
+  db
+    .select({ id: accounts.id, number: accounts.number, name: accounts.name })
+    .from(accounts)
+    .where(isNull(accounts.retiredAt))
+    .orderBy(accounts.name)
+    .all();

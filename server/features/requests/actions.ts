@@ -8,7 +8,7 @@ import { storeView } from '../../db/views/stores';
 import { dayOf } from '../../domain/civil';
 import { afterStoreReply, hasEnded, nextSteps } from '../../domain/request-steps';
 import type { ActionTx, ProducerContext } from '../../http/context';
-import { problem } from '../../http/problem';
+import { orNotFound, problem } from '../../http/problem';
 import { freezerOfStore } from '../deliveries/actions';
 import { nextNumber } from '../numbers';
 import { tellMember, tellStaff, tellStore } from './notify';
@@ -18,8 +18,7 @@ const FIRST_NUMBER = 1001;
 /** Files a service request for a store the viewer may see. Answers its id. */
 export function fileRequest(ctx: ProducerContext, { storeId, kind, freezerId, words }: Body<typeof fileEndpoint>): string {
   const { act, now, newId, viewer } = ctx;
-  const store = storeView(ctx.db, ctx.ability, storeId);
-  if (!store) throw problem('not-found');
+  const store = orNotFound(storeView(ctx.db, ctx.ability, storeId));
   return act('file-request', (tx) => {
     tx.authorise('create', 'Request', { storeId, kind, assigneeId: null });
     if (freezerId) freezerOfStore(tx.db, freezerId, storeId);

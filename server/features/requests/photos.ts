@@ -1,12 +1,11 @@
 import type { Request, RequestHandler } from 'express';
-import { fileTypeFromBuffer } from 'file-type';
 import multer from 'multer';
-import sharp from 'sharp';
 import { maxPhotoBytes, maxPhotos } from '../../contract/requests';
 import { eq, photos } from '../../db';
 import { hasEnded } from '../../domain/request-steps';
 import type { ProducerContext } from '../../http/context';
-import { problem } from '../../http/problem';
+import { orNotFound, problem } from '../../http/problem';
+import { redraw, type Picture } from '../pictures';
 import { addEntry, load, ruled } from './actions';
 
 /** Takes the files of a form into memory, within the limits. */
@@ -16,14 +15,6 @@ export const takePhotos: RequestHandler = multer({
 }).array('photos', maxPhotos);
 
 const LONGEST_SIDE = 2000;
-const MOST_PIXELS = 60_000_000;
-const TYPES = new Set(['image/jpeg', 'image/png', 'image/webp']);
-
-interface Picture {
-  bytes: Buffer;
-  width: number;
-  height: number;
-}
 
 /** Adds photos to a request: drawn anew, so that nothing but the picture is kept. */
 export async function addPhotos(ctx: ProducerContext, id: string, req: Request): Promise<void> {
@@ -31,7 +22,7 @@ export async function addPhotos(ctx: ProducerContext, id: string, req: Request):
   const before = load(ctx, id, ctx);
   if (files.length === 0) throw problem('photo-unreadable');
   refuse(before, files.length);
-  const pictures = await Promise.all(files.map(({ buffer }) => redraw(buffer)));
+  const pictures = await Promise.all(files.map(({ buffer }) => drawn(buffer)));
   const kept = pictures.map((picture) => ({ ...picture, id: ctx.newId(), file: `${ctx.newId()}.jpg` }));
   await Promise.all(kept.map(({ file, bytes }) => ctx.storage.put(file, bytes)));
   ctx.act('add-photos', (tx) => {
@@ -48,9 +39,7 @@ export async function addPhotos(ctx: ProducerContext, id: string, req: Request):
 
 export async function readPhoto({ db, storage }: ProducerContext, requestId: string, photoId: string): Promise<Buffer> {
   const photo = db.select({ file: photos.file, requestId: photos.requestId }).from(photos).where(eq(photos.id, photoId)).get();
-  const bytes = photo?.requestId === requestId ? await storage.get(photo.file) : null;
-  if (!bytes) throw problem('not-found');
-  return bytes;
+  return orNotFound(photo?.requestId === requestId ? await storage.get(photo.file) : null);
 }
 
 function refuse(request: ReturnType<typeof load>, more: number): void {
@@ -58,18 +47,5 @@ function refuse(request: ReturnType<typeof load>, more: number): void {
   if (request.photos + more > maxPhotos) throw problem('too-many-photos', { most: maxPhotos });
 }
 
-async function redraw(buffer: Buffer): Promise<Picture> {
-  const type = await fileTypeFromBuffer(buffer);
-  if (!type || !TYPES.has(type.mime)) throw problem('photo-unreadable');
-  try {
-    const { data, info } = await sharp(buffer, { limitInputPixels: MOST_PIXELS, failOn: 'error' })
-      .rotate()
-      .resize(LONGEST_SIDE, LONGEST_SIDE, { fit: 'inside', withoutEnlargement: true })
-      .flatten({ background: '#ffffff' })
-      .jpeg({ quality: 82, mozjpeg: true })
-      .toBuffer({ resolveWithObject: true });
-    return { bytes: data, width: info.width, height: info.height };
-  } catch {
-    throw problem('photo-unreadable');
-  }
-}
+const drawn = (buffer: Buffer): Promise<Picture> =>
+  redraw(buffer, LONGEST_SIDE, (picture) => picture.flatten({ background: '#ffffff' }).jpeg({ quality: 82, mozjpeg: true }));

@@ -7,7 +7,7 @@ import { membersByRole } from '../../db/views/people';
 import { readableRequests, requestsView, requestView } from '../../db/views/requests';
 import { live } from '../../db/views/stores';
 import type { ProducerContext } from '../../http/context';
-import { problem } from '../../http/problem';
+import { orNotFound } from '../../http/problem';
 import { route } from '../../http/route';
 import { requireSession } from '../../http/session';
 import { pageOf, readCursor } from '../cursor';
@@ -78,9 +78,7 @@ const whole = (ctx: ProducerContext, id: string): Request => present(ctx, and(eq
 const written = (ctx: ProducerContext, id: string): Request => present(ctx, eq(requests.id, id));
 
 function present({ db, ability }: ProducerContext, where: SQL | undefined): Request {
-  const found = where && requestView(db, where, (request) => ability.can('read', row('Note', ruled(request))));
-  if (!found) throw problem('not-found');
-  return found;
+  return orNotFound(where && requestView(db, where, (request) => ability.can('read', row('Note', ruled(request)))));
 }
 
 function filters({ state = 'live', kind, assignee, store, q }: Query<typeof api.requests.list>, me: string): (SQL | undefined)[] {

@@ -1,12 +1,13 @@
 import { api } from '../../contract';
 import { desc, telemetryKeys } from '../../db';
-import { quarantined, unclaimedSensors } from '../../db/views/sensors';
-import { problem } from '../../http/problem';
+import { quarantined, sensorsFound, unclaimedSensors } from '../../db/views/sensors';
+import { orNotFound } from '../../http/problem';
 import { route } from '../../http/route';
 import { pageOf, readCursor } from '../cursor';
 import { createKey, presentKey, revokeKey } from './actions';
 
 const { id, name, createdAt, lastUsedAt, revokedAt } = telemetryKeys;
+const MOST_FOUND = 20;
 
 export const sensorsRoutes = [
   route(api.sensors.listKeys, ({ db }) => ({
@@ -15,8 +16,7 @@ export const sensorsRoutes = [
 
   route(api.sensors.createKey, (ctx, { body }) => {
     const made = createKey(ctx, body);
-    const key = ctx.db.find(telemetryKeys, made.id);
-    if (!key) throw problem('not-found');
+    const key = orNotFound(ctx.db.find(telemetryKeys, made.id));
     return { key: presentKey(key), secret: made.secret };
   }),
 
@@ -31,6 +31,8 @@ export const sensorsRoutes = [
     const page = pageOf(unclaimedSensors(db, cursor ? String(cursor[0]) : null, limit + 1), limit, ({ serial }) => [serial]);
     return { sensors: page.rows, next: page.next };
   }),
+
+  route(api.sensors.find, ({ db }, { query }) => ({ sensors: sensorsFound(db, query.q, MOST_FOUND) })),
 
   route(api.sensors.listQuarantined, ({ db }, { query }) => {
     const limit = query.limit ?? 50;
