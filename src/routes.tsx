@@ -1,8 +1,15 @@
 import type { RouteObject } from 'react-router-dom';
+import { accountRoutes } from './features/accounts/routes';
+import { comparisonRoutes } from './features/comparison/routes';
+import { freezerPageRoutes } from './features/freezers/page-routes';
+import { fleetRoutes } from './features/freezers/routes';
 import { peopleRoutes } from './features/people/routes';
 import { requestRoutes } from './features/requests/routes';
 import { sensorRoutes } from './features/sensors/routes';
+import { settingsRoutes } from './features/settings/routes';
+import { storeFormRoutes } from './features/stores/form/routes';
 import { storeRoutes } from './features/stores/routes';
+import { truckRoutes } from './features/trucks/routes';
 import { Failure, FailurePage, NotFound } from './layouts/failure';
 import { FirstLook } from './layouts/first-look';
 import { MemberLayout } from './layouts/member-layout';
@@ -29,7 +36,14 @@ const producerRoutes: RouteObject[] = [
   ...requestRoutes,
   ...sensorRoutes,
   ...storeRoutes,
+  ...storeFormRoutes,
+  ...truckRoutes,
   ...peopleRoutes,
+  ...accountRoutes,
+  ...comparisonRoutes,
+  ...fleetRoutes,
+  ...freezerPageRoutes,
+  ...settingsRoutes,
   { path: 'changes', lazy: async () => (await import('./features/audit/changes')).changesPage },
 ];
 

@@ -1,13 +1,17 @@
 import { useEffect, useRef, type FormEvent, type ReactNode } from 'react';
 import { FormProvider, type FieldError, type FieldValues } from 'react-hook-form';
 import { useTranslation } from 'react-i18next';
+import type { Problem } from '../api/call';
+import { ChangedMeanwhile, type Meanwhile } from './changed-meanwhile';
 import { FormPending } from './form-pending';
 import { ProblemNote } from './problem-note';
 import type { ContractForm } from './use-contract-form';
 import { useFaultWords } from './use-fault-words';
 
-interface Props<V extends FieldValues, S extends FieldValues> {
+interface Props<V extends FieldValues, S extends FieldValues, N extends FieldValues> {
   form: ContractForm<V, S>;
+  /** For a form that sends a `version`. */
+  meanwhile?: Meanwhile<N>;
   className?: string;
   /** What was done, said once the server has it. */
   done?: string;
@@ -15,19 +19,19 @@ interface Props<V extends FieldValues, S extends FieldValues> {
 }
 
 /** The shell of every form: fields, what is wrong with them, what the server refused, what was done. */
-export function Form<V extends FieldValues, S extends FieldValues>({ form, className = '', done, children }: Props<V, S>) {
+export function Form<V extends FieldValues, S extends FieldValues, N extends FieldValues>({ form, meanwhile, className = '', done, children }: Props<V, S, N>) {
   const { fields, problem, pending, submit } = form;
   const send = (event: FormEvent) => {
     event.preventDefault();
     if (!pending) void submit();
   };
-  const faults = listOf(fields.formState.errors);
+  const faults = listOf(fields.formState.errors).sort(byPlace);
   return (
     <FormProvider {...fields}>
       <FormPending value={pending}>
         <form noValidate onSubmit={send} className={`grid gap-4 ${className}`}>
           {faults.length > 1 && <Summary faults={faults} tries={fields.formState.submitCount} />}
-          {problem && !(problem.type === 'bad-input' && faults.length > 0) && <ProblemNote problem={problem} />}
+          {problem && !(problem.type === 'bad-input' && faults.length > 0) && <Refused problem={problem} meanwhile={meanwhile} />}
           {children}
           <p role="status" className="text-ink-2 empty:hidden">
             {!problem && done}
@@ -37,6 +41,9 @@ export function Form<V extends FieldValues, S extends FieldValues>({ form, class
     </FormProvider>
   );
 }
+
+const Refused = <N extends FieldValues>({ problem, meanwhile }: { problem: Problem; meanwhile: Meanwhile<N> | undefined }) =>
+  meanwhile && problem.type === 'changed-meanwhile' ? <ChangedMeanwhile problem={problem} {...meanwhile} /> : <ProblemNote problem={problem} />;
 
 /** Every fault in one place, each leading to its field. */
 function Summary({ faults, tries }: { faults: FieldError[]; tries: number }) {
@@ -71,4 +78,10 @@ function listOf(errors: object): FieldError[] {
     if (typeof error !== 'object' || error === null || error instanceof Element) return [];
     return 'type' in error && typeof error.type === 'string' ? [error as FieldError] : listOf(error);
   });
+}
+
+/** From top to bottom; what is at no one place comes last. */
+function byPlace({ ref: a }: FieldError, { ref: b }: FieldError): number {
+  if (!(a instanceof Element) || !(b instanceof Element)) return Number(b instanceof Element) - Number(a instanceof Element);
+  return a.compareDocumentPosition(b) & Node.DOCUMENT_POSITION_FOLLOWING ? -1 : 1;
 }

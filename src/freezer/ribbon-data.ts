@@ -22,7 +22,8 @@ export interface RibbonData {
   history: readonly (readonly [number, number])[];
   forecast: readonly ForecastPoint[];
   deliveries: readonly { at: number; pounds?: number }[];
-  truck: RibbonTruck | null;
+  /** Null where none comes; undefined where that is not told. */
+  truck: RibbonTruck | null | undefined;
   /** A likely empty stretch before the truck. */
   empty: { from: number; to: number } | null;
   /** Daily highs in °F by civil day. */

@@ -32,7 +32,7 @@ function useSentences({ history, forecast, truck, empty }: RibbonData, format: F
   const end = forecast.at(-1);
   return [
     level ? t('ribbon.said.level', { share: format.percent(level[1]) }) : t('ribbon.said.no-level'),
-    truck ? t('ribbon.said.truck', { when: format.window(truck) }) : t('ribbon.said.no-truck'),
+    ...(truck === undefined ? [] : [truck ? t('ribbon.said.truck', { when: format.window(truck) }) : t('ribbon.said.no-truck')]),
     ...(empty ? [t('ribbon.said.empty', { from: format.when(empty.from), to: format.when(empty.to) })] : []),
     ...(end ? [t('ribbon.said.end', { when: format.date(end.at), ...sharesOf(end, format) })] : []),
   ];

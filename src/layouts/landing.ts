@@ -6,6 +6,7 @@ import { paths } from '../paths';
 export const landingOf = (member: Membership): string => landings[member.role](member);
 
 const storesOf = ({ producer }: Membership) => paths.stores(producer.slug);
+const freezersOf = ({ producer }: Membership) => paths.freezers(producer.slug);
 const requestsOf = ({ producer }: Membership) => paths.requests(producer.slug);
 
 const landings: Record<Role, (member: Membership) => string> = {
@@ -15,8 +16,8 @@ const landings: Record<Role, (member: Membership) => string> = {
   },
   'district-rep': storesOf,
   'support-agent': requestsOf,
-  dispatcher: storesOf,
+  dispatcher: freezersOf,
   driver: ({ producer }) => paths.stores(producer.slug, '?truck=today'),
   technician: ({ producer }) => paths.requests(producer.slug, '?assignee=me'),
-  'producer-admin': storesOf,
+  'producer-admin': freezersOf,
 };

@@ -3,11 +3,13 @@ import { Outlet, ScrollRestoration, useLocation, useNavigation } from 'react-rou
 import { useTranslation } from 'react-i18next';
 import { LeaveGuard } from '../form/leave-guard';
 import { FirstLook } from './first-look';
+import { SeeingBanner } from './seeing-banner';
 
-/** What is around every page: skip link, a sign that the next page is on its way, the leave guard. */
+/** What is around every page: what tells that one sees as somebody else, skip link, a sign that the next page is on its way, the leave guard. */
 export function Root() {
   return (
     <Suspense fallback={<FirstLook />}>
+      <SeeingBanner />
       <SkipLink />
       <OnItsWay />
       <Outlet />

@@ -10,6 +10,7 @@ import { KeptLanguageSwitch } from './kept-language-switch';
 import { landingOf } from './landing';
 import { Brand } from '../ui/brand';
 import { PersonMenu } from './person-menu';
+import { ProducerName } from './producer-name';
 
 interface Props {
   member: Membership;
@@ -47,11 +48,12 @@ function Supplier({ member }: { member: Membership }) {
     ...q(api.stores.read, { params: { producer, storeId: storeId ?? '' } }),
     enabled: storeId !== undefined,
   });
-  const name = member.producer.name;
+  const { name } = member.producer;
+  const shown = data ? t('producer-for', { producer: name, store: data.store.account }) : name;
   return (
-    <p className="hidden border-l border-edge pl-3 text-small text-ink-3 md:block">
-      {data ? t('producer-for', { producer: name, store: data.store.account }) : name}
-    </p>
+    <div className="hidden border-l border-edge pl-3 md:block">
+      <ProducerName producer={{ ...member.producer, name: shown }} />
+    </div>
   );
 }
 

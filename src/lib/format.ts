@@ -91,6 +91,8 @@ function numbersOf({ locale }: FormatOptions) {
     number: (value: number) => whole.format(value),
     percent: (share: number) => percents.format(share),
     pounds: (value: number) => `${whole.format(value)}\u00a0lb`,
+    /** What a bag holds, which need not be whole. */
+    bagPounds: (value: number) => `${tenths.format(value)}\u00a0lb`,
     degrees: (fahrenheit: number) => `${whole.format(fahrenheit)}\u00a0°F`,
     tenths: (value: number) => tenths.format(value),
     inches: (value: number) => `${tenths.format(value)}″`,

@@ -1,7 +1,7 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useMemo } from 'react';
 import { useParams } from 'react-router-dom';
-import { abilityFor, type Ability } from '../../server/contract/ability';
+import { abilityFor, type Ability, type Action, type Subject } from '../../server/contract/ability';
 import type { Membership } from '../../server/contract/auth';
 import type { Result } from '../../server/contract/endpoint';
 import { api } from '../../server/contract/index';
@@ -28,6 +28,11 @@ export function useAbility(): Ability {
   const { person } = useMe();
   const member = useMembership();
   return useMemo(() => abilityFor({ ...member, personId: person.id }), [person.id, member]);
+}
+
+/** Stops a page that only leads to an act the person may not do, as the server would stop the act. */
+export function useMust(action: Action, subject: Subject) {
+  if (!useAbility().can(action, subject)) throw new Problem('not-allowed', 403);
 }
 
 export const membershipAt = ({ memberships }: Me, producer: string | undefined): Membership | undefined =>

@@ -1,5 +1,6 @@
 import { useTranslation } from 'react-i18next';
 import { Link, useSearchParams } from 'react-router-dom';
+import { linkClass } from '../ui/link-class';
 
 interface Props {
   /** The cursor of the page that follows; null on the last. */
@@ -21,17 +22,15 @@ export function Pager({ next }: Props) {
   return (
     <div className="flex gap-4 py-4">
       {later && (
-        <Link to={to(null)} className={link}>
+        <Link to={to(null)} className={linkClass()}>
           {t('first')}
         </Link>
       )}
       {next && (
-        <Link to={to(next)} className={link}>
+        <Link to={to(next)} className={linkClass()}>
           {t('next')}
         </Link>
       )}
     </div>
   );
 }
-
-const link = 'inline-flex min-h-11 items-center font-semibold text-fjord underline underline-offset-4';

@@ -1,4 +1,4 @@
-import { useEffect, useState, type Ref } from 'react';
+import { useEffect, useState, type KeyboardEvent, type Ref } from 'react';
 import { Search } from 'lucide-react';
 
 interface Props {
@@ -36,8 +36,14 @@ export function SearchBox({ label, hint, value, onSearch, inputRef }: Props) {
         placeholder={hint}
         maxLength={120}
         onChange={(event) => setWords(event.target.value)}
+        onKeyDown={keepUnsent}
         className="min-h-11 w-full rounded-control border border-edge bg-surface pr-3 pl-10 text-ink placeholder:text-ink-3"
       />
     </label>
   );
 }
+
+/** Enter is no wish to send a form around the search. */
+const keepUnsent = (event: KeyboardEvent) => {
+  if (event.key === 'Enter') event.preventDefault();
+};

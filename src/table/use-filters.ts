@@ -8,23 +8,26 @@ export interface Filters {
   any: boolean;
 }
 
-/** A list's filters live in the URL, so that every list can be reached by a link. */
-export function useFilters(): Filters {
+/**
+ * A list's filters live in the URL, so that every list can be reached by a link. `names` are given where the URL says
+ * more than filters: only these are then counted and cleared.
+ */
+export function useFilters(names?: readonly string[]): Filters {
   const [search, setSearch] = useSearchParams();
-  const set = (name: string, value: string) =>
+  const filters = (names ?? [...search.keys()]).filter((name) => name !== 'after' && search.has(name));
+  const change = (act: (now: URLSearchParams) => void) =>
     setSearch(
       (now) => {
         now.delete('after');
-        if (value) now.set(name, value);
-        else now.delete(name);
+        act(now);
         return now;
       },
       { replace: true, state: { keepFocus: true } },
     );
   return {
     get: (name) => search.get(name) ?? '',
-    set,
-    clear: () => setSearch({}, { replace: true, state: { keepFocus: true } }),
-    any: [...search.keys()].some((name) => name !== 'after'),
+    set: (name, value) => change((now) => (value ? now.set(name, value) : now.delete(name))),
+    clear: () => change((now) => filters.forEach((name) => now.delete(name))),
+    any: filters.length > 0,
   };
 }

@@ -1,6 +1,7 @@
-import { useCallback, useId, type ChangeEvent, type ReactNode } from 'react';
+import { useId, type ChangeEvent, type ReactNode } from 'react';
 import { Camera, ImagePlus, X } from 'lucide-react';
 import { FieldError } from './field';
+import { usePicture } from './use-picture';
 
 export interface FileInputWords {
   add: string;
@@ -51,17 +52,9 @@ export function FileInput({ label, hint, error, files, onChange, max, accept, wo
 }
 
 function Photo({ file, words, onRemove }: { file: File; words: FileInputWords; onRemove: () => void }) {
-  const show = useCallback(
-    (image: HTMLImageElement) => {
-      const url = URL.createObjectURL(file);
-      image.src = url;
-      return () => URL.revokeObjectURL(url);
-    },
-    [file],
-  );
   return (
     <li className="relative">
-      <img ref={show} alt={words.preview(file.name)} className="size-24 rounded-control border border-edge object-cover" />
+      <img ref={usePicture(file)} alt={words.preview(file.name)} className="size-24 rounded-control border border-edge object-cover" />
       <button type="button" aria-label={words.remove(file.name)} onClick={onRemove} className="absolute top-0 right-0 grid size-12 place-items-start justify-items-end p-1">
         <span className="grid size-7 place-items-center rounded-full border border-edge bg-surface text-ink">
           <X aria-hidden size={16} />

@@ -1,10 +1,11 @@
 import { useTranslation } from 'react-i18next';
+import type { Subject } from '../../../server/contract/ability';
 import { useChangeWords } from './use-change-words';
 
 /** The values a change left behind, for those who ask. */
-export function ChangeDetails({ changes }: { changes: string }) {
+export function ChangeDetails({ subject, changes }: { subject: Subject; changes: string }) {
   const { t } = useTranslation('audit');
-  const lines = useChangeWords()(changes);
+  const lines = useChangeWords(subject)(changes);
   if (lines.length === 0) return <span className="text-ink-3">{t('none')}</span>;
   return (
     <details>

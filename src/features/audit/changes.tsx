@@ -1,12 +1,14 @@
 import { useTranslation } from 'react-i18next';
-import { subjects } from '../../../server/contract/ability';
-import { day } from '../../../server/contract/common';
-import type { QueryInput, Result } from '../../../server/contract/endpoint';
+import type { Result } from '../../../server/contract/endpoint';
 import { api } from '../../../server/contract/index';
+import { urlOf } from '../../api/call';
 import { page, type Place } from '../../api/page';
 import { q } from '../../api/query';
 import { PageTitle } from '../../layouts/page-title';
+import { useMembership } from '../../lib/me';
+import { CsvLink } from '../../table/csv-link';
 import { Pager } from '../../table/pager';
+import { queryFrom } from '../../table/query-from';
 import { useFilters } from '../../table/use-filters';
 import { EmptyState } from '../../ui/states';
 import { CardTable } from '../../table/card-table';
@@ -14,26 +16,30 @@ import { Actor } from './actor';
 import { ChangeDetails } from './change-details';
 import { ChangeFilters } from './change-filters';
 import { ChangeTime } from './change-time';
-import { shortId } from './short-id';
+import { isId, shortId } from './short-id';
+import { changeNouns } from './value-words';
 
 type Trail = Result<typeof api.audit.list>;
 
 export const changesPage = page({
-  // The kinds and states of requests are among the changed values.
-  words: ['audit', 'requests'],
+  words: changeNouns,
   queries: (place) => ({
-    trail: q(api.audit.list, { params: { producer: place.params.producer ?? '' }, query: queryOf(place) }),
+    trail: q(api.audit.list, { params: { producer: place.params.producer ?? '' }, query: queryFrom(api.audit.list, [...filterNames, 'after'], place.search) }),
   }),
   View: Changes,
 });
 
 /** Who did what and when, youngest first. */
-function Changes({ trail }: { trail: Trail }) {
+function Changes({ trail, place }: { trail: Trail; place: Place }) {
   const { t } = useTranslation('audit');
+  const { slug } = useMembership().producer;
   return (
     <div className="px-4 py-5 lg:px-7 lg:py-6">
       <PageTitle title={t('title')} />
-      <h1 className="text-title font-bold">{t('title')}</h1>
+      <div className="flex flex-wrap items-center justify-between gap-3">
+        <h1 className="text-title font-bold">{t('title')}</h1>
+        <CsvLink href={urlOf(api.audit.csv, { producer: slug }, queryFrom(api.audit.csv, filterNames, place.search))} />
+      </div>
       <p className="mt-1 max-w-prose text-ink-2">{t('lead')}</p>
       <ChangeFilters />
       {trail.entries.length === 0 ? <NoChanges /> : <Rows entries={trail.entries} />}
@@ -52,9 +58,9 @@ function Rows({ entries }: Pick<Trail, 'entries'>) {
       <Actor key="who" actor={actor} />,
       t([`acts.${act}`, 'other-act'], { act }),
       <span key="subject">
-        {t(`subjects.${subject}`)} <span className="text-small whitespace-nowrap text-ink-3">{shortId(subjectId)}</span>
+        {t(`subjects.${subject}`)} {isId(subjectId) && <span className="text-small whitespace-nowrap text-ink-3">{shortId(subjectId)}</span>}
       </span>,
-      <ChangeDetails key="changes" changes={changes} />,
+      <ChangeDetails key="changes" subject={subject} changes={changes} />,
     ],
   }));
   return <CardTable label={t('title')} columns={columns} rows={rows} />;
@@ -66,12 +72,4 @@ function NoChanges() {
   return <EmptyState title={t(`${state}.title`)}>{t(`${state}.words`)}</EmptyState>;
 }
 
-/** A filter the contract does not know is left out rather than refused: links are typed and shortened by people. */
-function queryOf({ search }: Place): QueryInput<typeof api.audit.list> {
-  return {
-    subject: subjects.find((known) => known === search.get('subject')),
-    from: day.safeParse(search.get('from')).data,
-    to: day.safeParse(search.get('to')).data,
-    after: search.get('after') ?? undefined,
-  };
-}
+const filterNames = ['subject', 'subjectId', 'actor', 'from', 'to'] as const;

@@ -4,40 +4,47 @@ import { useNavigate } from 'react-router-dom';
 import { row } from '../../../server/contract/ability';
 import { api } from '../../../server/contract/index';
 import { useAct } from '../../api/act';
-import { ProblemNote } from '../../form/problem-note';
+import { Confirm } from '../../form/confirm';
 import { useAbility, useMembership } from '../../lib/me';
 import { paths } from '../../paths';
 import { Button } from '../../ui/button';
-import { Dialog } from '../../ui/dialog';
+
+interface Props {
+  storeId: string;
+}
 
 /** Takes the next truck away, after asking. */
-export function ClearTruck({ storeId }: { storeId: string }) {
+export function ClearTruck({ storeId }: Props) {
   const { t } = useTranslation('deliveries');
   const [asking, setAsking] = useState(false);
-  const navigate = useNavigate();
-  const { slug } = useMembership().producer;
-  const ability = useAbility();
-  const clear = useAct(api.deliveries.clearNextTruck, [api.stores.read, api.stores.list]);
-  if (!ability.can('delete', row('NextTruck', { storeId }))) return null;
-  const act = () =>
-    clear.mutate({ params: { producer: slug, storeId } }, { onSuccess: () => void navigate(paths.store(slug, storeId)) });
+  if (!useAbility().can('delete', row('NextTruck', { storeId }))) return null;
   return (
     <div className="mt-8 border-t border-rule pt-4">
       <Button variant="quiet" size="big" onClick={() => setAsking(true)}>
         {t('next-truck.clear')}
       </Button>
-      <Dialog open={asking} title={t('next-truck.clear-ask')} onClose={() => setAsking(false)}>
-        <p>{t('next-truck.clear-words')}</p>
-        {clear.error && <ProblemNote problem={clear.error} />}
-        <div className="mt-4 flex flex-wrap gap-3">
-          <Button busy={clear.isPending} onClick={act}>
-            {t('next-truck.clear-yes')}
-          </Button>
-          <Button variant="quiet" onClick={() => setAsking(false)}>
-            {t('next-truck.clear-no')}
-          </Button>
-        </div>
-      </Dialog>
+      {asking && <Question storeId={storeId} onClose={() => setAsking(false)} />}
     </div>
+  );
+}
+
+function Question({ storeId, onClose }: Props & { onClose: () => void }) {
+  const { t } = useTranslation('deliveries');
+  const navigate = useNavigate();
+  const { slug } = useMembership().producer;
+  const clear = useAct(api.deliveries.clearNextTruck, [api.stores.read, api.stores.list]);
+  const act = () => clear.mutate({ params: { producer: slug, storeId } }, { onSuccess: () => void navigate(paths.store(slug, storeId)) });
+  return (
+    <Confirm
+      title={t('next-truck.clear-ask')}
+      yes={t('next-truck.clear-yes')}
+      no={t('next-truck.clear-no')}
+      variant="primary"
+      act={clear}
+      onYes={act}
+      onClose={onClose}
+    >
+      <p>{t('next-truck.clear-words')}</p>
+    </Confirm>
   );
 }

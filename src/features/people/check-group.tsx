@@ -7,7 +7,7 @@ interface Item {
 interface Props {
   legend: string;
   /** Said where there is nothing to choose. */
-  none: string;
+  none?: string;
   items: Item[];
   chosen: string[];
   onToggle: (id: string) => void;

@@ -5,31 +5,20 @@ import { api } from '../../../server/contract/index';
 import type { MemberOf } from '../../../server/contract/people';
 import { useAct } from '../../api/act';
 import { q } from '../../api/query';
-import { ProblemNote } from '../../form/problem-note';
+import { Confirm } from '../../form/confirm';
 import { useMembership } from '../../lib/me';
-import { Button, ButtonRow } from '../../ui/button';
-import { Dialog } from '../../ui/dialog';
 import { Field } from '../../ui/field';
 import { Select } from '../../ui/select';
 
 interface Props {
-  /** Who is about to lose access; null while nobody is. */
-  member: MemberOf | null;
+  /** Who is about to lose access. */
+  member: MemberOf;
   onClose: () => void;
   onDone: (words: string) => void;
 }
 
 /** Ends somebody's access, after one question; their open requests can go to somebody else. */
-export function Deactivate({ member, onClose, onDone }: Props) {
-  const { t } = useTranslation('people');
-  return (
-    <Dialog open={member !== null} title={t('deactivate.title', { name: member?.name })} onClose={onClose}>
-      {member && <Question member={member} onClose={onClose} onDone={onDone} />}
-    </Dialog>
-  );
-}
-
-function Question({ member: { id, name }, onClose, onDone }: Props & { member: MemberOf }) {
+export function Deactivate({ member: { id, name }, onClose, onDone }: Props) {
   const { t } = useTranslation('people');
   const { slug } = useMembership().producer;
   const [successor, setSuccessor] = useState('');
@@ -45,19 +34,10 @@ function Question({ member: { id, name }, onClose, onDone }: Props & { member: M
       },
     );
   return (
-    <div className="grid gap-4">
+    <Confirm title={t('deactivate.title', { name })} yes={t('deactivate.yes')} no={t('deactivate.no')} act={change} onYes={deactivate} onClose={onClose}>
       <p>{t('deactivate.words')}</p>
       <Successor leaving={id} value={successor} onChange={setSuccessor} />
-      {change.error && <ProblemNote problem={change.error} />}
-      <ButtonRow>
-        <Button variant="danger" busy={change.isPending} onClick={deactivate}>
-          {t('deactivate.yes')}
-        </Button>
-        <Button variant="quiet" onClick={onClose}>
-          {t('deactivate.no')}
-        </Button>
-      </ButtonRow>
-    </div>
+    </Confirm>
   );
 }
 

@@ -11,6 +11,7 @@ import { useContractForm } from '../../form/use-contract-form';
 import { useMembership } from '../../lib/me';
 import { paths } from '../../paths';
 import type { Done } from './done';
+import { grantedTo } from './grants';
 import { PersonFrame } from './person-frame';
 import { placesQuery, type Places } from './places-query';
 import { RoleFields } from './role-fields';
@@ -28,8 +29,8 @@ function Invite({ places }: { places: Places }) {
   const navigate = useNavigate();
   const { slug } = useMembership().producer;
   const form = useContractForm(api.people.invite, {
-    start: { email: '', name: '', side: 'producer', scopes: [] },
-    input: (body) => ({ params: { producer: slug }, body: { ...body, scopes: isScoped(body.role) ? body.scopes : [] } }),
+    start: { email: '', name: '', side: 'producer', scopes: [], grants: [] },
+    input: (body) => ({ params: { producer: slug }, body: { ...body, scopes: isScoped(body.role) ? body.scopes : [], grants: grantedTo(body.role, body.grants) } }),
     stale: [api.people.list, api.requests.assignees],
     onDone: ({ name }) => void navigate(paths.people(slug), { state: { act: 'invited', name } satisfies Done }),
   });

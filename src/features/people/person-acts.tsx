@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { api } from '../../../server/contract/index';
 import type { MemberOf } from '../../../server/contract/people';
@@ -5,6 +6,7 @@ import { useAct } from '../../api/act';
 import { ProblemNote } from '../../form/problem-note';
 import { useMembership } from '../../lib/me';
 import { Button, ButtonRow } from '../../ui/button';
+import { SeeAs } from './see-as';
 
 interface Props {
   member: MemberOf;
@@ -13,12 +15,14 @@ interface Props {
 }
 
 /** What can be done about somebody besides changing their role. */
-export function PersonActs({ member: { id, name, active }, onDone, onLeave }: Props) {
+export function PersonActs({ member, onDone, onLeave }: Props) {
+  const { id, name, active } = member;
   const { t } = useTranslation('people');
-  const { slug } = useMembership().producer;
+  const { producer, membershipId } = useMembership();
+  const [asking, setAsking] = useState(false);
   const again = useAct(api.people.inviteAgain, []);
   const activate = useAct(api.people.change, [api.people.list, api.requests.assignees]);
-  const params = { producer: slug, memberId: id };
+  const params = { producer: producer.slug, memberId: id };
   const problem = again.error ?? activate.error;
   const sendAgain = () => again.mutate({ params }, { onSuccess: () => onDone(t('done.again', { name })) });
   const bringBack = () => activate.mutate({ params, body: { active: true } }, { onSuccess: () => onDone(t('done.activated', { name })) });
@@ -30,6 +34,11 @@ export function PersonActs({ member: { id, name, active }, onDone, onLeave }: Pr
             <Button variant="quiet" busy={again.isPending} label={t('again.of', { name })} onClick={sendAgain}>
               {t('again.button')}
             </Button>
+            {id !== membershipId && (
+              <Button variant="quiet" onClick={() => setAsking(true)}>
+                {t('see-as.button', { name })}
+              </Button>
+            )}
             <Button variant="quiet" label={t('deactivate.of', { name })} onClick={onLeave}>
               {t('deactivate.button')}
             </Button>
@@ -41,6 +50,7 @@ export function PersonActs({ member: { id, name, active }, onDone, onLeave }: Pr
         )}
       </ButtonRow>
       {problem && <ProblemNote problem={problem} />}
+      {asking && <SeeAs member={member} onClose={() => setAsking(false)} />}
     </div>
   );
 }

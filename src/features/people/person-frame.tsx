@@ -4,6 +4,7 @@ import { Link } from 'react-router-dom';
 import { PageTitle } from '../../layouts/page-title';
 import { useMembership } from '../../lib/me';
 import { paths } from '../../paths';
+import { linkClass } from '../../ui/link-class';
 
 interface Props {
   title: string;
@@ -18,7 +19,7 @@ export function PersonFrame({ title, lead, children }: Props) {
   return (
     <div className="max-w-2xl px-4 py-5 lg:px-7 lg:py-6">
       <PageTitle title={title} />
-      <Link to={paths.people(slug)} className="inline-flex min-h-11 items-center font-semibold text-fjord underline underline-offset-4">
+      <Link to={paths.people(slug)} className={linkClass()}>
         {t('all')}
       </Link>
       <h1 className="text-title font-bold wrap-anywhere">{title}</h1>

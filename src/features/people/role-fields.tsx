@@ -6,6 +6,8 @@ import { roles, sides, type Role, type Side } from '../../../server/contract/wor
 import { SelectField } from '../../form/select-field';
 import { ChoiceCards } from '../../ui/choice-cards';
 import { AssignmentFields } from './assignment-fields';
+import { GrantFields } from './grant-fields';
+import { grantsOf } from './grants';
 import type { Places } from './places-query';
 import { isScoped } from './scoped';
 
@@ -20,7 +22,7 @@ interface Props {
   now?: MemberOf;
 }
 
-/** The role, and what only some roles are asked: whose side, and which stores. */
+/** The role, and what only some roles are asked: whose side, which stores, and what beyond the role. */
 export function RoleFields({ places, now }: Props) {
   const { t } = useTranslation(['people', 'common']);
   const chosen = useWatch<Values, 'role'>({ name: 'role' });
@@ -42,6 +44,7 @@ export function RoleFields({ places, now }: Props) {
       {isScoped(role) && (
         <AssignmentFields places={places} storeNames={storeNames} onNamed={(id, name) => setStoreNames((known) => new Map(known).set(id, name))} />
       )}
+      {grantsOf(role).length > 0 && <GrantFields offered={grantsOf(role)} />}
     </>
   );
 }

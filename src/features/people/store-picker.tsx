@@ -1,14 +1,11 @@
-import { useRef, useState, type KeyboardEvent } from 'react';
-import { keepPreviousData, useQuery } from '@tanstack/react-query';
+import { useRef, useState } from 'react';
 import { X } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
-import { api } from '../../../server/contract/index';
 import { Problem } from '../../api/call';
-import { q } from '../../api/query';
 import { ProblemNote } from '../../form/problem-note';
-import { useMembership } from '../../lib/me';
 import { SearchBox } from '../../table/search-box';
 import { IconButton } from '../../ui/button';
+import { useFoundStores } from '../stores/use-found-stores';
 import { CheckGroup } from './check-group';
 
 interface Props {
@@ -41,7 +38,7 @@ export function StorePicker({ chosen, names, onNamed, onToggle }: Props) {
           ))}
         </ul>
       )}
-      <search className="mt-1 flex" onKeyDown={keepUnsent}>
+      <search className="mt-1 flex">
         <SearchBox label={t('stores.search')} hint={t('stores.search-hint')} value={words} onSearch={setWords} inputRef={box} />
       </search>
       {words && <Found words={words} chosen={chosen} onNamed={onNamed} onToggle={onToggle} />}
@@ -49,18 +46,9 @@ export function StorePicker({ chosen, names, onNamed, onToggle }: Props) {
   );
 }
 
-/** Enter in the search is no wish to send the form around it. */
-const keepUnsent = (event: KeyboardEvent) => {
-  if (event.key === 'Enter') event.preventDefault();
-};
-
 function Found({ words, chosen, onNamed, onToggle }: Omit<Props, 'names'> & { words: string }) {
   const { t } = useTranslation('people');
-  const { slug } = useMembership().producer;
-  const { data, error } = useQuery({
-    ...q(api.stores.list, { params: { producer: slug }, query: { q: words, limit: '10' } }),
-    placeholderData: keepPreviousData,
-  });
+  const { data, error } = useFoundStores(words);
   if (error instanceof Problem) return <ProblemNote problem={error} />;
   if (!data) return null;
   const toggle = (id: string) => {

@@ -5,6 +5,7 @@ import { q } from '../../api/query';
 import { KeptLanguageSwitch } from '../../layouts/kept-language-switch';
 import { PageTitle } from '../../layouts/page-title';
 import { ThemeChoice } from '../../layouts/theme-choice';
+import { useIsSeeing } from '../../layouts/use-seeing';
 import { useSignOut } from '../../layouts/use-sign-out';
 import { useMe } from '../../lib/me';
 import { Button } from '../../ui/button';
@@ -22,6 +23,7 @@ function Profile({ sessions }: Parameters<typeof Sessions>[0]) {
   const { t } = useTranslation('profile');
   const signOut = useSignOut();
   const { person } = useMe();
+  const isSeeing = useIsSeeing();
   return (
     <div className="grid max-w-2xl gap-8 px-4 py-6 lg:px-7">
       <PageTitle title={t('title')} />
@@ -30,12 +32,14 @@ function Profile({ sessions }: Parameters<typeof Sessions>[0]) {
         <p className="text-ink-3">{person.email}</p>
       </header>
       <NameForm name={person.name} />
-      <section>
-        <h2 className="mb-2 font-bold">{t('language')}</h2>
-        <span className="inline-flex">
-          <KeptLanguageSwitch />
-        </span>
-      </section>
+      {!isSeeing && (
+        <section>
+          <h2 className="mb-2 font-bold">{t('language')}</h2>
+          <span className="inline-flex">
+            <KeptLanguageSwitch />
+          </span>
+        </section>
+      )}
       <section className="max-w-sm">
         <h2 className="mb-2 font-bold">{t('theme')}</h2>
         <ThemeChoice />

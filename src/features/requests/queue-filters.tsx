@@ -1,5 +1,4 @@
-import { useState, type Ref } from 'react';
-import { SlidersHorizontal } from 'lucide-react';
+import type { Ref } from 'react';
 import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
 import { api } from '../../../server/contract/index';
@@ -7,10 +6,11 @@ import { stateFilters } from '../../../server/contract/requests';
 import { requestKinds } from '../../../server/contract/words';
 import { q } from '../../api/query';
 import { useAbility, useMembership } from '../../lib/me';
-import { SearchBox } from '../../table/search-box';
+import { FilterSearch } from '../../table/filter-search';
+import { FilterSelect } from '../../table/filter-select';
+import { MoreFilters } from '../../table/more-filters';
 import { useFilters } from '../../table/use-filters';
 import { Button } from '../../ui/button';
-import { FilterSelect } from '../../table/filter-select';
 
 interface Props {
   searchRef: Ref<HTMLInputElement>;
@@ -20,33 +20,17 @@ interface Props {
 export function QueueFilters({ searchRef }: Props) {
   const { t } = useTranslation('requests');
   const filters = useFilters();
-  const [shown, show] = useState(false);
   const states = stateFilters.map((state) => ({ value: state === 'live' ? '' : state, label: t(stateKey(state)) }));
   const kinds = [{ value: '', label: t('filters.any-kind') }, ...requestKinds.map((kind) => ({ value: kind, label: t(`kinds.${kind}`) }))];
   return (
     <search className="grid gap-2 px-4 pb-4" aria-label={t('filters.label')}>
-      <SearchBox
-        inputRef={searchRef}
-        label={t('filters.search')}
-        hint={t('filters.search-hint')}
-        value={filters.get('q')}
-        onSearch={(words) => filters.set('q', words)}
-      />
-      <button
-        type="button"
-        aria-expanded={shown}
-        onClick={() => show(!shown)}
-        className="flex min-h-11 items-center gap-2 justify-self-start font-semibold text-fjord lg:hidden"
-      >
-        <SlidersHorizontal aria-hidden size={18} />
-        {t('filters.label')}
-      </button>
-      <div className={`${shown ? 'grid' : 'hidden lg:grid'} grid-cols-2 gap-2`}>
+      <FilterSearch label={t('filters.search')} hint={t('filters.search-hint')} filters={filters} inputRef={searchRef} />
+      <MoreFilters label={t('filters.label')} from="lg" className="grid grid-cols-2 gap-2">
         <FilterSelect label={t('filters.state')} name="state" options={states} filters={filters} />
         <FilterSelect label={t('filters.kind')} name="kind" options={kinds} filters={filters} />
         <AssigneeFilter />
         <StoreFilter />
-      </div>
+      </MoreFilters>
       {filters.any && (
         <Button variant="quiet" onClick={filters.clear}>
           {t('filters.clear')}

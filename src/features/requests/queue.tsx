@@ -1,16 +1,17 @@
 import { useRef } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Outlet, useNavigate, useParams, useSearchParams } from 'react-router-dom';
-import type { QueryInput } from '../../../server/contract/endpoint';
 import { api } from '../../../server/contract/index';
 import type { RequestSummary } from '../../../server/contract/requests';
-import { page, type Place } from '../../api/page';
+import { page } from '../../api/page';
 import { q } from '../../api/query';
 import { PageTitle } from '../../layouts/page-title';
 import { useMembership } from '../../lib/me';
 import { paths } from '../../paths';
 import { Pager } from '../../table/pager';
+import { queryFrom } from '../../table/query-from';
 import { EmptyState } from '../../ui/states';
+import { DeskHours } from './desk-hours';
 import { QueueFilters } from './queue-filters';
 import { QueueKeys } from './queue-keys';
 import { QueueRow } from './queue-row';
@@ -20,7 +21,7 @@ const EVERY = 30_000;
 export const queue = page({
   words: ['requests'],
   queries: (place) => ({
-    list: q(api.requests.list, { params: { producer: place.params.producer ?? '' }, query: queryOf(place) }, { everyMs: EVERY }),
+    list: q(api.requests.list, { params: { producer: place.params.producer ?? '' }, query: queryFrom(api.requests.list, filterNames, place.search) }, { everyMs: EVERY }),
   }),
   View: Queue,
 });
@@ -53,6 +54,11 @@ function ListPane({ list, open }: Props & { open: string | undefined }) {
     <section aria-label={t('list.label')} className={side === 'store' ? '-mx-4 max-w-3xl' : `${beside} ${open ? 'hidden lg:block' : ''}`}>
       {!open && <PageTitle title={title} />}
       <Heading className="px-4 pt-5 pb-3 text-title font-bold lg:pt-6">{title}</Heading>
+      {side === 'store' && (
+        <div className="px-4 pb-3 empty:hidden">
+          <DeskHours />
+        </div>
+      )}
       <QueueFilters searchRef={searchRef} />
       <Rows requests={list.requests} open={open} />
       <div className="px-4">
@@ -63,7 +69,7 @@ function ListPane({ list, open }: Props & { open: string | undefined }) {
   );
 }
 
-const beside = 'lg:sticky lg:top-0 lg:h-dvh lg:overflow-y-auto lg:border-r lg:border-rule';
+const beside = 'lg:sticky lg:top-(--banner) lg:h-[calc(100dvh-var(--banner))] lg:overflow-y-auto lg:border-r lg:border-rule';
 
 function Rows({ requests, open }: { requests: RequestSummary[]; open: string | undefined }) {
   const { t } = useTranslation('requests');
@@ -105,12 +111,3 @@ function Pick() {
 }
 
 const filterNames = ['state', 'kind', 'assignee', 'store', 'q', 'after'] as const;
-
-/** A filter the contract does not know is left out rather than refused: links are typed and shortened by people. */
-function queryOf({ search }: Place): QueryInput<typeof api.requests.list> {
-  const wanted = Object.fromEntries(filterNames.flatMap((name) => (search.get(name) ? [[name, search.get(name)]] : [])));
-  const parsed = api.requests.list.query.safeParse(wanted);
-  if (parsed.success) return wanted;
-  const wrong = new Set(parsed.error.issues.map((issue) => String(issue.path[0])));
-  return Object.fromEntries(Object.entries(wanted).filter(([name]) => !wrong.has(name)));
-}

@@ -7,10 +7,10 @@ import { page } from '../../api/page';
 import { q } from '../../api/query';
 import { useFormat } from '../../lib/format';
 import { useMembership } from '../../lib/me';
+import { CardTable } from '../../table/card-table';
 import { Button } from '../../ui/button';
 import { EmptyState } from '../../ui/states';
 import { useNow } from '../stores/use-now';
-import { CardTable } from '../../table/card-table';
 import { EndKey } from './end-key';
 import { KeyActs, type KeyAct } from './key-acts';
 import { KeyState } from './key-state';
@@ -52,14 +52,16 @@ function Keys({ listed: { keys } }: { listed: Result<typeof api.sensors.listKeys
         {ended && t('keys.end.done', { name: ended })}
       </p>
       <NewKey open={act !== null && act.kind !== 'end'} replaced={act?.kind === 'replace' ? act.key : null} onClose={close} />
-      <EndKey
-        ending={act?.kind === 'end' ? act.key : null}
-        onClose={close}
-        onEnded={({ name }) => {
-          setEnded(name);
-          close();
-        }}
-      />
+      {act?.kind === 'end' && (
+        <EndKey
+          ending={act.key}
+          onClose={close}
+          onEnded={({ name }) => {
+            setEnded(name);
+            close();
+          }}
+        />
+      )}
     </SensorsFrame>
   );
 }

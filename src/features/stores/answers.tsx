@@ -12,17 +12,17 @@ export interface Telling {
   several: boolean;
 }
 
-/** Is it full, is it cold, when is the truck coming. */
+/** Is it full, is it cold, when is the truck coming, where that is told. */
 export function Answers({ answers, ...telling }: Telling & { answers: Told }) {
   const { t } = useTranslation('store');
   return (
     <section
       aria-label={t('answers.label')}
-      className="mt-5 grid divide-y divide-rule rounded-card border border-rule bg-surface lg:grid-cols-3 lg:divide-x lg:divide-y-0"
+      className="mt-5 grid divide-y divide-rule rounded-card border border-rule bg-surface lg:auto-cols-fr lg:grid-flow-col lg:divide-x lg:divide-y-0"
     >
       <FullAnswer answer={answers.full} {...telling} />
       <ColdAnswer answer={answers.cold} {...telling} />
-      <ComingAnswer answer={answers.coming} {...telling} />
+      {answers.coming && <ComingAnswer answer={answers.coming} {...telling} />}
     </section>
   );
 }

@@ -8,7 +8,7 @@ import { Allowed } from './allowed';
 import { FiledReport } from './filed-report';
 import { RequestForm } from './request-form';
 import { StoreFrame } from './store-frame';
-import { knownOf } from './store-known';
+import { useKnown } from './store-known';
 import { storeQuery } from './store-query';
 import { useNow } from './use-now';
 import { useStoreWords } from './use-store-words';
@@ -52,6 +52,7 @@ function AskForIce({ found, place }: Props) {
 function Planned({ found }: { found: StorePage }) {
   const { t } = useTranslation('report');
   const say = useStoreWords(found.store.timeZone, useNow());
-  const truck = truckToCome(knownOf(found));
+  const truck = truckToCome(useKnown(found));
+  if (truck === undefined) return null;
   return <p className="mt-1 text-ink-2">{truck ? t('sooner.words-told', { when: say.dayAndWindow(truck) }) : t('sooner.none-told')}</p>;
 }

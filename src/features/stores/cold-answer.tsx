@@ -2,6 +2,7 @@ import { useTranslation } from 'react-i18next';
 import type { ColdAnswer as Told, ColdSaid } from '../../../server/domain/answers';
 import { AnswerBox, type Tone } from './answer-box';
 import type { Telling } from './answers';
+import { ColdSentence } from './cold-sentence';
 import { useStoreWords } from './use-store-words';
 
 const tones: Record<ColdSaid['key'], Tone> = {
@@ -31,31 +32,9 @@ export function ColdAnswer({ answer, zone, now }: Telling & { answer: Told }) {
       tone={tones[said.key]}
     >
       <p>
-        <Sentence said={said} zone={zone} now={now} />
+        <ColdSentence said={said} zone={zone} now={now} />
       </p>
       {value && <p className={value.freshness === 'fresh' ? undefined : 'font-semibold text-straw'}>{t('answers.cold.heard', { ago: say.ago('heard' in said ? said.heard : value.at) })}</p>}
     </AnswerBox>
   );
-}
-
-function Sentence({ said, zone, now }: { said: ColdSaid; zone: string; now: number }) {
-  const { t } = useTranslation('store');
-  const say = useStoreWords(zone, now);
-  const key = `answers.cold.said.${said.key}` as const;
-  switch (said.key) {
-    case 'silent':
-      return t(key, { when: say.when(said.heard) });
-    case 'warm':
-      return `${t(key, { freezer: said.freezer, since: say.whenBefore(said.since) })} ${said.others > 0 ? t('answers.cold.said.warm-others', { count: said.others }) : ''}`;
-    case 'above-once':
-      return t(key, { freezer: said.freezer });
-    case 'holding':
-      return t(key, { count: said.count, context: said.count === 2 ? 'both' : undefined });
-    case 'holding-some':
-      return t(key, { count: said.count, all: said.count + said.unknown });
-    case 'no-freezers':
-    case 'no-sensor':
-    case 'waiting':
-      return t(key);
-  }
 }

@@ -1,24 +1,26 @@
 import { useSyncExternalStore } from 'react';
-import { useQuery } from '@tanstack/react-query';
+import type { UseQueryResult } from '@tanstack/react-query';
 import { WifiOff } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
-import type { Place } from '../../api/page';
-import { useStoreWords } from './use-store-words';
-import { storeQuery } from './store-query';
+import { useFormat } from '../../lib/format';
+
+interface Props {
+  asked: Pick<UseQueryResult, 'dataUpdatedAt' | 'isRefetchError'>;
+  now: number;
+}
 
 /** Says how old the page is while the newest cannot be had; lies over the page, so that nothing read moves. */
-export function ConnectionNote({ place, now }: { place: Place; now: number }) {
+export function ConnectionNote({ asked, now }: Props) {
   const { t } = useTranslation('store');
-  const { data, dataUpdatedAt, isRefetchError } = useQuery(storeQuery(place));
-  const say = useStoreWords(data?.store.timeZone ?? 'UTC', now);
+  const format = useFormat();
   const online = useOnline();
-  const cut = !online || isRefetchError;
+  const cut = !online || asked.isRefetchError;
   return (
     <div role="status" className="pointer-events-none fixed inset-x-0 bottom-36 z-20 flex justify-center px-4 lg:bottom-6">
       {cut && (
         <p className="flex items-center gap-2 rounded-control border border-straw bg-straw-tint px-4 py-2.5 text-base font-semibold text-straw">
           <WifiOff aria-hidden size={18} className="shrink-0" />
-          {t(online ? 'unreached' : 'offline', { ago: say.ago(dataUpdatedAt) })}
+          {t(online ? 'unreached' : 'offline', { ago: format.ago(asked.dataUpdatedAt, now) })}
         </p>
       )}
     </div>

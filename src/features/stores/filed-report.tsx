@@ -9,6 +9,7 @@ import { ProblemNote } from '../../form/problem-note';
 import { useMembership } from '../../lib/me';
 import { paths } from '../../paths';
 import { Button, buttonClass } from '../../ui/button';
+import { DeskHours } from '../requests/desk-hours';
 import { StepHeading } from './step-heading';
 import type { PhotoSending } from './use-photo-sending';
 
@@ -33,6 +34,7 @@ export function FiledReport({ requestId, store, kind = 'done', sending }: Props)
         <StepHeading>{kind === 'done' ? t('done.title', { number }) : t('sooner.done', { number })}</StepHeading>
       </div>
       <p className="mt-1 text-ink-2">{kind === 'done' ? t('done.words') : t('sooner.done-words')}</p>
+      <DeskHours />
       {sending && sending.count > 0 && <Photos requestId={requestId} sending={sending} />}
       <div className="mt-5 flex flex-wrap gap-3">
         <Link className={buttonClass('primary', { size: 'big' })} to={paths.store(producer, store.id)}>{t('done.store')}</Link>

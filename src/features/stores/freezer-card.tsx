@@ -1,17 +1,14 @@
 import { useTranslation } from 'react-i18next';
+import { Link } from 'react-router-dom';
 import type { Freezer } from '../../../server/contract/freezers';
 import type { StorePage } from '../../../server/contract/stores';
 import { truckToCome } from '../../../server/domain/answers';
-import { standingOf, type Standing } from '../../../server/domain/freezer-standing';
-import { freshnessOf } from '../../../server/domain/freshness';
-import { FreezerDrawings } from './freezer-drawings';
-import { FreezerLanes } from './freezer-lanes';
-import { FreezerRunOuts } from './freezer-run-outs';
-import { FreezerSure } from './freezer-sure';
+import { standingOf } from '../../../server/domain/freezer-standing';
+import { useMembership } from '../../lib/me';
+import { paths } from '../../paths';
+import { FreezerSeen } from './freezer-seen';
 import { FreezerTag } from './freezer-tag';
-import { FreezerUnseen } from './freezer-unseen';
-import { knownOf } from './store-known';
-import { useStoreWords } from './use-store-words';
+import { useKnown } from './store-known';
 
 interface Props {
   freezer: Freezer;
@@ -19,9 +16,9 @@ interface Props {
   now: number;
 }
 
-/** One freezer: its name, how it stands, the two drawings, its bags, and how sure all that is. */
+/** One freezer: its name, how it stands, and what is seen into it. */
 export function FreezerCard({ freezer, found, now }: Props) {
-  const standing = standingOf(freezer, truckToCome(knownOf(found)), now, found.store.timeZone);
+  const standing = standingOf(freezer, truckToCome(useKnown(found)), now, found.store.timeZone);
   const heading = `freezer-${freezer.id}`;
   return (
     <article aria-labelledby={heading} className="rounded-card border border-rule bg-surface px-4 py-4 sm:px-5">
@@ -31,44 +28,24 @@ export function FreezerCard({ freezer, found, now }: Props) {
         </h2>
         <FreezerTag freezer={freezer} standing={standing} now={now} />
       </div>
-      {freezer.sensor && freezer.state ? (
-        <Seen freezer={freezer} state={freezer.state} standing={standing} found={found} now={now} />
-      ) : (
-        <FreezerUnseen freezer={freezer} found={found} now={now} />
-      )}
+      <FreezerSeen freezer={freezer} found={found} now={now} />
+      <FreezerLink freezer={freezer} />
     </article>
   );
 }
 
-interface SeenProps extends Props {
-  state: NonNullable<Freezer['state']>;
-  standing: Standing;
-}
-
-function Seen({ freezer, state, standing, found, now }: SeenProps) {
-  const zone = found.store.timeZone;
-  const believed = standing.kind !== 'silent';
-  return (
-    <>
-      <Age at={state.at} zone={zone} now={now} />
-      <FreezerDrawings freezer={freezer} state={state} found={found} now={now}>
-        {believed && <FreezerLanes freezer={freezer} state={state} />}
-        {believed && <FreezerRunOuts freezer={freezer} state={state} zone={zone} now={now} />}
-        <FreezerSure freezer={freezer} state={state} zone={zone} now={now} />
-      </FreezerDrawings>
-    </>
-  );
-}
-
-/** Old data says how old it is. */
-function Age({ at, zone, now }: { at: number; zone: string; now: number }) {
+/** The producer's people go on to what the store is not asked to care for. */
+function FreezerLink({ freezer: { id, name } }: { freezer: Freezer }) {
   const { t } = useTranslation('store');
-  const say = useStoreWords(zone, now);
-  const freshness = freshnessOf(at, now);
-  if (freshness === 'fresh') return null;
+  const { producer, side } = useMembership();
+  if (side !== 'producer') return null;
   return (
-    <p className="mt-1 text-base font-semibold text-straw">
-      {freshness === 'unusable' ? t('freezer.unusable', { when: say.when(at) }) : t('freezer.old', { ago: say.ago(at) })}
-    </p>
+    <Link
+      to={paths.freezer(producer.slug, id)}
+      aria-label={t('freezer.page-of', { freezer: name })}
+      className="mt-1 -mb-2 inline-flex min-h-11 items-center text-small text-ink-2 underline decoration-edge underline-offset-4 hover:decoration-ink"
+    >
+      {t('freezer.page')}
+    </Link>
   );
 }

@@ -18,6 +18,7 @@ const tones: Record<TagKey, TagTone> = {
   'may-run-out-first': 'ember',
   'truck-first': 'fjord',
   'runs-out': 'quiet',
+  'runs-out-untold': 'quiet',
   keeps: 'quiet',
   learning: 'quiet',
 };

@@ -2,6 +2,7 @@ import { useTranslation } from 'react-i18next';
 import { Link } from 'react-router-dom';
 import type { StorePage } from '../../../server/contract/stores';
 import type { Place } from '../../api/page';
+import { linkClass } from '../../ui/link-class';
 import { Caution } from './caution';
 import { PhotoPicker } from './photo-picker';
 import type { usePhotos } from './photos';
@@ -29,7 +30,7 @@ export function ReportDetails({ step, found, place, of, photos, onFiled }: Props
       <p className="text-ink-2">{t('details.optional')}</p>
       <Chosen step={step} found={found} search={place.search} />
       <div className="mt-3">
-        <Caution kind={kind} />
+        <Caution kind={kind} store={found.store} />
       </div>
       <RequestForm
         start={{ storeId: found.store.id, kind, freezerId }}
@@ -60,7 +61,7 @@ function Chosen({ step, found, search }: Pick<Props, 'step' | 'found'> & { searc
           <dt className="text-small text-ink-3">{label}</dt>
           <dd className="font-semibold">{value}</dd>
           <dd className="col-start-2 row-span-2 row-start-1 self-center">
-            <Link to={again} aria-label={t('change-what', { what: label })} className="inline-flex min-h-12 items-center font-semibold text-fjord underline underline-offset-4">
+            <Link to={again} aria-label={t('change-what', { what: label })} className={linkClass('big')}>
               {t('change')}
             </Link>
           </dd>

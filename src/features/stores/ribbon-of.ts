@@ -1,11 +1,10 @@
 import type { Freezer } from '../../../server/contract/freezers';
 import type { StorePage } from '../../../server/contract/stores';
-import { truckToCome } from '../../../server/domain/answers';
+import { truckToCome, type StoreNow } from '../../../server/domain/answers';
 import { addDays, dayOf, startOfDay } from '../../../server/domain/civil';
 import { emptyBeforeTruck, forecastCurve, shareLoad } from '../../../server/domain/forecast';
 import { freshnessOf } from '../../../server/domain/freshness';
 import type { RibbonData } from '../../freezer/ribbon-data';
-import { knownOf } from './store-known';
 
 const hour = 3_600_000;
 const stepMs = 3 * hour;
@@ -15,10 +14,10 @@ type State = NonNullable<Freezer['state']>;
 type Truck = NonNullable<StorePage['nextTruck']>;
 
 /** What the ribbon of one freezer is drawn from; nothing is foretold from a level too old to believe. */
-export function ribbonOf(freezer: Freezer, state: State, found: StorePage, now: number): Omit<RibbonData, 'truck'> & { truck: Truck | null } {
+export function ribbonOf(freezer: Freezer, state: State, found: StorePage, known: StoreNow, now: number): Omit<RibbonData, 'truck'> & { truck: Truck | null } {
   const zone = found.store.timeZone;
   const believed = freshnessOf(state.at, now) !== 'unusable';
-  const coming = truckToCome(knownOf(found)) && found.nextTruck;
+  const coming = truckToCome(known) && found.nextTruck;
   const truck = coming && coming.to >= now ? coming : null;
   return {
     now,

@@ -5,7 +5,7 @@ import { useAbility, useMembership } from '../../lib/me';
 import { paths } from '../../paths';
 import { buttonClass } from '../../ui/button';
 
-/** What can be asked for here, within thumb's reach on a phone; dispatch has its own two. */
+/** What can be asked for here, within thumb's reach on a phone; the producer's people have acts of their own. */
 export function StoreActions({ storeId }: { storeId: string }) {
   const { t } = useTranslation('store');
   const { producer, side } = useMembership();
@@ -13,23 +13,22 @@ export function StoreActions({ storeId }: { storeId: string }) {
   const slug = producer.slug;
   const mayReport = ability.can('create', row('Request', { storeId, kind: 'other' }));
   const mayAsk = ability.can('create', row('Request', { storeId, kind: 'ice-sooner' }));
-  const mayPlan = ability.can('update', row('NextTruck', { storeId }));
-  const mayRecord = ability.can('create', row('Delivery', { storeId }));
-  if (!mayReport && !mayAsk && !mayPlan && !mayRecord) return null;
+  const staff = [
+    { may: ability.can('update', row('NextTruck', { storeId })), to: paths.nextTruck(slug, storeId), words: t('actions.next-truck') },
+    { may: ability.can('create', row('Delivery', { storeId })), to: paths.recordDelivery(slug, storeId), words: t('actions.record') },
+    { may: ability.can('update', row('Store', { id: storeId })), to: paths.changeStore(slug, storeId), words: t('actions.change') },
+    { may: ability.can('create', row('Freezer', { storeId })), to: paths.newFreezer(slug, storeId), words: t('actions.new-freezer') },
+  ].filter(({ may }) => may);
+  if (!mayReport && !mayAsk && staff.length === 0) return null;
   return (
     <div className="flex flex-wrap gap-3">
-      {(mayPlan || mayRecord) && (
+      {staff.length > 0 && (
         <div role="group" aria-label={t('actions.staff')} className="flex flex-wrap gap-3">
-          {mayPlan && (
-            <Link className={buttonClass('quiet', { size: 'big' })} to={paths.nextTruck(slug, storeId)}>
-              {t('actions.next-truck')}
+          {staff.map(({ to, words }) => (
+            <Link key={to} className={buttonClass('quiet', { size: 'big' })} to={to}>
+              {words}
             </Link>
-          )}
-          {mayRecord && (
-            <Link className={buttonClass('quiet', { size: 'big' })} to={paths.recordDelivery(slug, storeId)}>
-              {t('actions.record')}
-            </Link>
-          )}
+          ))}
         </div>
       )}
       {(mayReport || mayAsk) && (

@@ -1,20 +1,21 @@
 import { useTranslation } from 'react-i18next';
 import { Link } from 'react-router-dom';
+import { row } from '../../../server/contract/ability';
 import type { StorePage } from '../../../server/contract/stores';
-import { useMembership } from '../../lib/me';
+import { useAbility, useMembership } from '../../lib/me';
 import { paths } from '../../paths';
+import { linkClass } from '../../ui/link-class';
+import { Section } from '../../ui/section';
 import { DeliveryLines } from '../deliveries/delivery-lines';
 
-/** What was left lately, and the way to all of it. */
+/** What was left lately, and the way to all of it, for those who may know. */
 export function StoreDeliveries({ found }: { found: StorePage }) {
   const { t } = useTranslation('store');
   const { producer } = useMembership();
   const { store, deliveries } = found;
+  if (!useAbility().can('read', row('Delivery', { storeId: store.id }))) return null;
   return (
-    <section aria-labelledby="recent-deliveries">
-      <h2 id="recent-deliveries" className="border-b border-rule pb-2.5 font-bold">
-        {t('deliveries.title')}
-      </h2>
+    <Section title={t('deliveries.title')}>
       {deliveries.length === 0 ? (
         <p className="py-3 text-ink-2">{t('deliveries.none')}</p>
       ) : (
@@ -28,12 +29,12 @@ export function StoreDeliveries({ found }: { found: StorePage }) {
           </ul>
           <Link
             to={paths.storeDeliveries(producer.slug, store.id)}
-            className="inline-flex min-h-12 items-center font-semibold text-fjord underline underline-offset-4"
+            className={linkClass('big')}
           >
             {t('deliveries.all')}
           </Link>
         </>
       )}
-    </section>
+    </Section>
   );
 }

@@ -1,3 +1,4 @@
+import { useQuery } from '@tanstack/react-query';
 import { useTranslation } from 'react-i18next';
 import { answersFor } from '../../../server/domain/answers';
 import type { StorePage } from '../../../server/contract/stores';
@@ -9,7 +10,7 @@ import { FreezerCard } from './freezer-card';
 import { usePagePadding } from './store-frame';
 import { StoreActions } from './store-actions';
 import { StoreDeliveries } from './store-deliveries';
-import { knownOf } from './store-known';
+import { useKnown } from './store-known';
 import { storeQuery } from './store-query';
 import { StoreRequests } from './store-requests';
 import { UrgentPhone } from './urgent-phone';
@@ -25,8 +26,9 @@ interface Props {
 /** What a store manager looks at at seven in the morning: full, cold, coming, and who is fixing it. */
 function StoreView({ found, place }: Props) {
   const now = useNow();
+  const asked = useQuery(storeQuery(place));
   const { store } = found;
-  const answers = answersFor(knownOf(found), now);
+  const answers = answersFor(useKnown(found), now);
   return (
     <div className={`${usePagePadding()} pb-24 lg:pb-8`}>
       <PageTitle title={store.name} />
@@ -35,7 +37,7 @@ function StoreView({ found, place }: Props) {
         <StoreActions storeId={store.id} />
       </div>
       <Answers answers={answers} zone={store.timeZone} now={now} several={found.freezers.length > 1} />
-      <UrgentPhone answers={answers} />
+      <UrgentPhone store={store} answers={answers} />
       <div className="mt-6 grid gap-6 lg:grid-cols-[minmax(0,1fr)_312px]">
         <Freezers found={found} now={now} />
         <div className="grid content-start gap-8">
@@ -43,7 +45,7 @@ function StoreView({ found, place }: Props) {
           <StoreDeliveries found={found} />
         </div>
       </div>
-      <ConnectionNote place={place} now={now} />
+      <ConnectionNote asked={asked} now={now} />
     </div>
   );
 }

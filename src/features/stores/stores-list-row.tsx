@@ -4,28 +4,27 @@ import type { StoreSummary } from '../../../server/contract/stores';
 import { freshnessOf } from '../../../server/domain/freshness';
 import { useMembership } from '../../lib/me';
 import { useFormat } from '../../lib/format';
-import { paths } from '../../paths';
 import { AttentionTag } from './attention-tag';
+import { truckWords } from './truck-words';
 import { useStoreWords } from './use-store-words';
 
 interface Props {
   store: StoreSummary;
+  /** Where the row leads. */
+  to: string;
   now: number;
 }
 
 /** One store: 52 px on a desk, a card on a phone. */
-export function StoresListRow({ store, now }: Props) {
+export function StoresListRow({ store, to, now }: Props) {
   const { t } = useTranslation('stores-list');
   const { producer, side } = useMembership();
   const format = useStoreWords(side === 'store' ? store.timeZone : producer.timeZone, now);
   const { nextTruck, openRequests, runOutLikely } = store;
-  // A weekday says enough within a week.
-  const truckWords = (truck: { from: number; to: number }) =>
-    Math.abs(truck.from - now) < 6 * DAY_MS ? format.window(truck) : `${format.date(truck.from)}, ${format.times(truck)}`;
   return (
     <tr role="row" className="relative grid grid-cols-2 gap-x-4 gap-y-2 rounded-card border border-rule bg-surface p-4 hover:bg-ice-3 lg:table-row lg:rounded-none lg:border-0 lg:p-0">
       <th scope="row" role="rowheader" className={`${cell} col-span-2 font-normal`}>
-        <Link to={paths.store(producer.slug, store.id)} className="font-semibold text-ink after:absolute after:inset-0">
+        <Link to={to} className="font-semibold text-ink after:absolute after:inset-0">
           {store.name}
         </Link>
         <span className="block text-small text-ink-3">
@@ -41,7 +40,7 @@ export function StoresListRow({ store, now }: Props) {
       </td>
       <td role="cell" className={cell}>
         <Narrow label={t('columns.truck')} />
-        {nextTruck ? truckWords(nextTruck) : t('no-truck')}
+        {nextTruck ? truckWords(nextTruck, format, now) : t('no-truck')}
       </td>
       <td role="cell" className={cell}>
         <Narrow label={t('columns.requests')} />
@@ -54,7 +53,6 @@ export function StoresListRow({ store, now }: Props) {
   );
 }
 
-const DAY_MS = 86_400_000;
 const cell = 'block align-middle lg:table-cell lg:border-t lg:border-rule lg:px-3 lg:py-1.5';
 
 /** The column's name, where there are no columns. */
@@ -64,7 +62,7 @@ const Narrow = ({ label }: { label: string }) => (
   </span>
 );
 
-function Level({ store, now }: Props) {
+function Level({ store, now }: Omit<Props, 'to'>) {
   const { t } = useTranslation('stores-list');
   const format = useFormat();
   const { share, pounds, at } = store;

@@ -1,13 +1,21 @@
 import { Phone } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
+import type { StorePage } from '../../../server/contract/stores';
 import type { Answers } from '../../../server/domain/answers';
 import { useMembership } from '../../lib/me';
-import { phoneLink, phoneText } from './phone-link';
+import { phoneLink, phoneText } from '../../lib/phone-link';
+import { useUrgentPhone } from './use-urgent-phone';
 
-/** The producer's urgent phone, only where something cannot wait for a form. */
-export function UrgentPhone({ answers }: { answers: Answers }) {
+interface Props {
+  store: StorePage['store'];
+  answers: Answers;
+}
+
+/** The urgent phone, only where something cannot wait for a form. */
+export function UrgentPhone({ store, answers }: Props) {
   const { t } = useTranslation('store');
-  const { name, urgentPhone } = useMembership().producer;
+  const { name } = useMembership().producer;
+  const urgentPhone = useUrgentPhone(store);
   if (!isUrgent(answers) || !urgentPhone) return null;
   return (
     <a
@@ -21,4 +29,4 @@ export function UrgentPhone({ answers }: { answers: Answers }) {
 }
 
 const isUrgent = ({ full, cold, coming }: Answers): boolean =>
-  cold.said.key === 'warm' || full.said.key === 'empty' || coming.said.key === 'late' || coming.said.key === 'missed';
+  cold.said.key === 'warm' || full.said.key === 'empty' || coming?.said.key === 'late' || coming?.said.key === 'missed';

@@ -1,0 +1,15 @@
+import type { FreezerModel } from '../../../server/contract/products';
+
+/** What the form about a model starts with. */
+export const modelEnteredOf = ({ name, insideWidthIn, insideDepthIn, insideHeightIn, doors, ratedPounds, defrost, version }: FreezerModel) => ({
+  name,
+  insideWidthIn,
+  insideDepthIn,
+  insideHeightIn,
+  doors,
+  ratedPounds,
+  defrost,
+  version,
+});
+
+export type ModelEntered = ReturnType<typeof modelEnteredOf>;
