@@ -6,6 +6,7 @@ import {
   deliveries,
   deliveryLines,
   districts,
+  fillFleetRows,
   freezers,
   freezerStates,
   installs,
@@ -30,7 +31,7 @@ import {
   type ProducerDb,
 } from '../server/db';
 import type { RequestKind, RequestState } from '../server/contract/words';
-import type { FreezerState } from '../server/domain/freezer-state';
+import { stateOf } from './states';
 import { lotWord, noteWord, places, type Member, type ProducerCast, type StoreName } from './cast';
 
 /** Tuesday, December 1, 2026, 9:00 in Chicago (UTC−6). */
@@ -52,7 +53,7 @@ export function plantProducer(db: Database, cast: ProducerCast, members: Record<
   const producerId = idOf(cast.slug, 'producer');
   const { slug, name, language, mark } = cast;
   db.insert(producers)
-    .values({ id: producerId, slug, name: `${name} ${mark}`, timeZone: 'America/Chicago', language, urgentPhone: `555-0100 ${mark}`, createdAt: morning - 400 * day })
+    .values({ id: producerId, slug, name: `${name} ${mark}`, timeZone: 'America/Chicago', language, urgentPhone: `555-0100 ${mark}`, logo: logoFileOf(cast), createdAt: morning - 400 * day })
     .run();
   const garden: Garden = { cast, db: producerDb(db, producerId), id: (thing) => idOf(cast.namespace, thing), text: (words) => `${words} ${mark}` };
   plantPlaces(garden);
@@ -61,6 +62,7 @@ export function plantProducer(db: Database, cast: ProducerCast, members: Record<
   plantTrucks(garden);
   plantRequests(garden, Object.keys(members));
   plantRecords(garden);
+  fillFleetRows(garden.db);
 }
 
 interface Garden {
@@ -82,7 +84,7 @@ function plantPlaces({ db, id, text }: Garden): void {
       accountId: id(account),
       districtId: id(district),
       name: text(name),
-      kind: text('corner shop'),
+      kind: 'convenience',
       street: text('1 Main Street'),
       city: text('Alder Gap'),
       region: text('MO'),
@@ -156,44 +158,11 @@ function plantFreezers({ cast, db, id, text }: Garden, firstSensorNo: number): v
     }
     db.insert(sensors, { id: id(`${store} sensor`), no: firstSensorNo + i, serial: serialOf(cast, store), firstHeardAt: createdAt, createdAt });
     db.insert(installs, { id: id(`${store} install`), sensorId: id(`${store} sensor`), freezerId, probesIn, from: createdAt });
-    const state = stateOf(id, firstSensorNo);
+    const state = stateOf(id, { at: morning - 12 * 60_000, likely: morning + 3 * day, products: ['small bag', 'large bag'], supplyV: 3 + firstSensorNo / 1000 });
     const { at, level, airF, warmSince, runOut } = state;
     const row = { at, pounds: level.pounds, capacityPounds: level.capacityPounds, share: level.share, airF, warmSince };
     db.insert(freezerStates, { id: freezerId, ...row, runOutEarly: runOut.early, runOutLikely: runOut.likely, runOutLate: runOut.late, state });
   });
-}
-
-function stateOf(id: (thing: string) => string, firstSensorNo: number): FreezerState {
-  const at = morning - 12 * 60_000;
-  const lane = (product: string, bags: number, bagPounds: number) => ({
-    productId: id(product),
-    pounds: bags * bagPounds,
-    sdPounds: 20,
-    capacityPounds: 750,
-    bags,
-    about: true,
-    stackIn: 25,
-    borrowed: false,
-  });
-  const runOut = { early: morning + 2 * day, likely: morning + 3 * day, late: morning + 5 * day };
-  const level = { pounds: 700, sdPounds: 30, capacityPounds: 1500, share: 700 / 1500, lanes: [lane('small bag', 40, 7), lane('large bag', 21, 20)] };
-  return {
-    at,
-    level,
-    distancesIn: [30, 31, 29],
-    airF: 18,
-    airAt: at,
-    warmSince: null,
-    supplyV: 3 + firstSensorNo / 1000,
-    runOut: { ...runOut, lane: 0 },
-    laneRunOuts: [runOut, { early: null, likely: null, late: null }],
-    rates: [
-      { poundsPerDay: 90, sdPounds: 20, days: 7 },
-      { poundsPerDay: 60, sdPounds: 15, days: 7 },
-    ],
-    deliveries: [{ at: morning - 2 * day, pounds: [300, 200] }],
-    history: [[at - day, 0.6], [at, 700 / 1500]],
-  };
 }
 
 /** Lantern's truck comes today, so that it is a stop of the driver; campo's in three days. */
@@ -261,7 +230,8 @@ function plantRequests({ cast, db, id, text }: Garden, members: string[]): void 
 }
 
 export const photoFileOf = (cast: ProducerCast, request: string): string => `${idOf(cast.slug, `${request} photo`)}.jpg`;
-export const photoFiles = (cast: ProducerCast): string[] => plantedRequests.map(({ name }) => photoFileOf(cast, name));
+export const logoFileOf = (cast: ProducerCast): string => `${idOf(cast.slug, 'logo')}.png`;
+export const photoFiles = (cast: ProducerCast): string[] => [...plantedRequests.map(({ name }) => photoFileOf(cast, name)), logoFileOf(cast)];
 
 function plantRecords({ cast, db, id, text }: Garden): void {
   const keyHash = createHash('sha256').update(telemetryKeyOf(cast)).digest('base64url');

@@ -70,7 +70,7 @@ describe('problems', () => {
   });
 
   test('of the server itself say nothing but a number to ask about, and are logged', async () => {
-    const broken = await testApp('alder', (services) => ({ ...services, system: { ...services.system, membershipsOf: () => { throw new Error('the secret cause'); } } }));
+    const broken = await testApp('alder', (services) => ({ ...services, system: { ...services.system, membershipAt: () => { throw new Error('the secret cause'); } } }));
     const answer = await browserOf(broken, alderPeople.agent).get('/api/alder-ice/stores').expect(500);
     expect(answer.text).not.toContain('secret cause');
     expect(answer.body.requestId).toMatch(/^[\w-]{8,}$/);

@@ -15,7 +15,8 @@ afterAll(() => portal.close());
 const id = (thing: string) => idOf(alder.namespace, thing);
 const at = `/${alder.slug}`;
 const store = `${at}/stores/${id('lantern')}`;
-const { manager, managerOfThree, rep, agent, dispatcher, driver, technician, admin } = alderPeople;
+const freezer = `${at}/freezers/${id('lantern freezer')}`;
+const { manager, managerOfThree, rep, storeRep, agent, dispatcher, driver, technician, admin } = alderPeople;
 
 const pages: [name: string, person: Member | null, path: string][] = [
   ['sign-in', null, '/sign-in'],
@@ -40,7 +41,34 @@ const pages: [name: string, person: Member | null, path: string][] = [
   ['unclaimed sensors', admin, `${at}/sensors`],
   ['readings not believed', technician, `${at}/sensors/readings`],
   ['telemetry keys', admin, `${at}/sensors/keys`],
+  ['freezers', dispatcher, `${at}/freezers`],
+  ['freezers at risk, one beside', agent, `${at}/freezers?show=first&open=${id('lantern freezer')}`],
+  ['no freezer found', technician, `${at}/freezers?q=zzzz`],
+  ['freezers on the map', admin, `${at}/freezers?view=map`],
+  ['a freezer', admin, freezer],
+  ['a freezer for its rep', rep, freezer],
+  ['a freezer for a technician', technician, freezer],
+  ['new freezer', admin, `${store}/freezers/new`],
+  ['change a freezer', admin, `${freezer}/change`],
+  ['tie a sensor', technician, `${freezer}/sensor`],
+  ['stores for an admin', admin, `${at}/stores?retired=only`],
+  ['new store', admin, `${at}/stores/new`],
+  ['change a store', admin, `${store}/change`],
+  ['next trucks of many', dispatcher, `${at}/trucks`],
+  ['late trucks', admin, `${at}/trucks?truck=late`],
+  ['accounts', admin, `${at}/accounts`],
+  ['accounts to read', agent, `${at}/accounts?q=zzzz`],
+  ['new account', admin, `${at}/accounts/new`],
+  ['an account', admin, `${at}/accounts/${id('chain')}`],
+  ['change an account', admin, `${at}/accounts/${id('chain')}/change`],
+  ['districts', admin, `${at}/accounts/districts`],
+  ['products', admin, `${at}/accounts/products`],
+  ['models', technician, `${at}/accounts/models`],
+  ['comparison', rep, `${at}/comparison`],
+  ['comparison for a chain', storeRep, `${at}/comparison?q=zzzz`],
+  ['settings', admin, `${at}/settings`],
   ['people', admin, `${at}/people`],
+  ['a person', admin, `${at}/people/${id('rep')}`],
   ['invite somebody', admin, `${at}/people/invite`],
   ['history of changes', admin, `${at}/changes`],
   ['profile', manager, '/profile'],

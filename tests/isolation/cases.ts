@@ -35,6 +35,12 @@ const store = { storeId: thing('lantern', 'juniper') };
 const freezer = { freezerId: thing('lantern freezer', 'juniper freezer') };
 const request = { requestId: thing('cold request', 'sooner request') };
 const sooner = { requestId: thing('lantern sooner') };
+const account = { accountId: thing('chain') };
+const places = { accountId: thing('corner'), districtId: thing('south') };
+const parts = { storeId: thing('lantern'), modelId: thing('model'), productId: thing('small bag') };
+const model = { name: 'Chest', insideWidthIn: 40, insideDepthIn: 24, insideHeightIn: 30, doors: 1, ratedPounds: 400, defrost: 'auto' };
+
+const placesAsked = { district: thing('north'), account: thing('chain') };
 
 const all = alderMembers;
 const but = (...left: AlderMember[]): AlderMember[] => all.filter((name) => !left.includes(name));
@@ -42,9 +48,12 @@ const stranger = ['otherManager'] as const;
 const desk = ['rep', 'storeRep', 'agent', 'technician', 'admin'] as const;
 
 export const cases: Case[] = [
-  { endpoint: api.stores.list, allowed: all },
+  { endpoint: api.stores.list, query: { district: thing('north'), account: thing('chain') }, allowed: all },
   { endpoint: api.stores.read, path: store, allowed: but('otherManager'), hidden: stranger },
-  { endpoint: api.freezers.list, allowed: all },
+  { endpoint: api.freezers.list, query: { ...placesAsked, store: thing('lantern', 'juniper'), q: 'front' }, allowed: all },
+  { endpoint: api.freezers.digest, query: placesAsked, allowed: all },
+  { endpoint: api.freezers.map, query: { show: 'first' }, allowed: all },
+  { endpoint: api.freezers.csv, query: { columns: 'level,state' }, allowed: all },
   { endpoint: api.freezers.read, path: freezer, allowed: but('otherManager'), hidden: stranger },
   {
     endpoint: api.deliveries.setNextTruck,
@@ -62,7 +71,49 @@ export const cases: Case[] = [
     body: ({ productId, freezerId }) => ({ at: morning - hour, lines: [{ productId, freezerId, bags: 20, lot: 'L1' }] }),
     allowed: ['dispatcher', 'driver', 'admin'],
   },
-  { endpoint: api.products.list, allowed: ['agent', 'dispatcher', 'driver', 'technician', 'admin'] },
+  { endpoint: api.trucks.list, query: { district: thing('north'), account: thing('chain') }, allowed: ['dispatcher', 'admin'] },
+  {
+    endpoint: api.trucks.set,
+    named: store,
+    body: ({ storeId }) => ({ trucks: [{ storeId, day: '2026-12-02', from: '09:00', to: '10:30', version: 1 }] }),
+    allowed: ['dispatcher', 'admin'],
+  },
+  { endpoint: api.comparison.read, allowed: all },
+  { endpoint: api.comparison.csv, query: { q: 'a' }, allowed: all },
+  { endpoint: api.products.list, query: { retired: 'too' }, allowed: ['agent', 'dispatcher', 'driver', 'technician', 'admin'] },
+  { endpoint: api.products.create, body: () => ({ name: '10 lb cubes', bagPounds: 10, gtin: '' }), allowed: ['admin'] },
+  { endpoint: api.products.change, path: { productId: thing('small bag') }, body: () => ({ version: 1, name: 'Seven' }), allowed: ['admin'] },
+  { endpoint: api.models.list, query: { retired: 'too' }, allowed: ['agent', 'dispatcher', 'technician', 'admin'] },
+  { endpoint: api.models.create, body: () => model, allowed: ['technician', 'admin'] },
+  { endpoint: api.models.change, path: { modelId: thing('model') }, body: () => ({ version: 1, name: 'Two-door' }), allowed: ['technician', 'admin'] },
+
+  { endpoint: api.accounts.list, query: { q: 'c' }, allowed: ['agent', 'dispatcher', 'admin'] },
+  { endpoint: api.accounts.read, path: account, allowed: ['agent', 'dispatcher', 'admin'] },
+  { endpoint: api.accounts.create, body: () => ({ number: '9', name: 'Bluff', terms: '', language: 'en', contacts: [] }), allowed: ['admin'] },
+  { endpoint: api.accounts.change, path: account, body: () => ({ version: 1, number: '9' }), allowed: ['admin'] },
+  { endpoint: api.districts.list, allowed: ['agent', 'dispatcher', 'technician', 'admin'] },
+  { endpoint: api.districts.create, body: () => ({ name: 'Lakeside' }), allowed: ['admin'] },
+  { endpoint: api.districts.change, path: { districtId: thing('north') }, body: () => ({ version: 1, name: 'Lakeside' }), allowed: ['admin'] },
+  { endpoint: api.stores.readSettings, path: { storeId: thing('lantern') }, allowed: ['admin'] },
+  { endpoint: api.stores.create, named: places, body: (named) => ({ ...shop, ...named }), allowed: ['admin'] },
+  { endpoint: api.stores.change, path: { storeId: thing('lantern') }, named: places, body: (named) => ({ version: 1, name: 'Lighthouse', ...named }), allowed: ['admin'] },
+  { endpoint: api.freezers.readSettings, path: { freezerId: thing('lantern freezer') }, allowed: ['admin'] },
+  { endpoint: api.freezers.create, named: parts, body: (named) => ({ assetNumber: 'S-1', ...cabinet(named) }), allowed: ['admin'] },
+  {
+    endpoint: api.freezers.change,
+    path: { freezerId: thing('lantern freezer') },
+    named: parts,
+    body: (named) => ({ version: 1, ...cabinet(named) }),
+    allowed: ['admin'],
+  },
+  {
+    endpoint: api.freezers.tieSensor,
+    path: freezer,
+    named: { sensorId: thing('lantern sensor') },
+    body: ({ sensorId }) => ({ sensorId, probesIn: [11, 36, 59] }),
+    allowed: ['technician', 'admin'],
+  },
+  { endpoint: api.freezers.takeSensorOff, path: freezer, allowed: ['technician', 'admin'] },
   { endpoint: api.requests.list, query: { store: thing('lantern', 'juniper'), assignee: thing('technician'), state: 'any' }, allowed: all },
   {
     endpoint: api.requests.file,
@@ -104,7 +155,7 @@ export const cases: Case[] = [
     hidden: stranger,
   },
   { endpoint: api.requests.note, path: request, body: () => ({ words: 'bring a gasket' }), allowed: ['agent', 'dispatcher', 'technician', 'admin'] },
-  { endpoint: api.requests.addPhotos, path: request, form: photo, allowed: but('otherManager', 'dispatcher'), hidden: stranger },
+  { endpoint: api.requests.addPhotos, path: request, form: () => picture('photos'), allowed: but('otherManager', 'dispatcher'), hidden: stranger },
   {
     endpoint: api.requests.readPhoto,
     path: { ...request, photoId: thing('cold request photo', 'sooner request photo') },
@@ -122,6 +173,7 @@ export const cases: Case[] = [
   },
   { endpoint: api.sensors.revokeKey, path: { keyId: thing('key') }, allowed: ['admin'] },
   { endpoint: api.sensors.listUnclaimed, allowed: ['agent', 'dispatcher', 'technician', 'admin'] },
+  { endpoint: api.sensors.find, query: { q: 'lantern' }, allowed: ['agent', 'dispatcher', 'technician', 'admin'] },
   { endpoint: api.sensors.listQuarantined, allowed: ['agent', 'dispatcher', 'technician', 'admin'] },
 
   { endpoint: api.people.list, allowed: ['admin'] },
@@ -147,8 +199,15 @@ export const cases: Case[] = [
     allowed: ['admin'],
   },
   { endpoint: api.people.inviteAgain, path: { memberId: thing('manager') }, allowed: ['admin'] },
-  { endpoint: api.people.places, allowed: ['admin'] },
+  { endpoint: api.people.seeAs, path: { memberId: thing('manager') }, allowed: ['admin'] },
+  { endpoint: api.people.places, allowed: ['agent', 'dispatcher', 'technician', 'admin'] },
   { endpoint: api.audit.list, query: { actor: thing('manager') }, allowed: ['admin'] },
+  { endpoint: api.audit.csv, query: { actor: thing('manager') }, allowed: ['admin'] },
+  { endpoint: api.settings.read, allowed: ['admin'] },
+  { endpoint: api.settings.change, body: () => ({ version: 1, riskLimit: 0.3, urgentPhone: '555-0199' }), allowed: ['admin'] },
+  { endpoint: api.settings.setLogo, form: () => picture('logo'), allowed: ['admin'] },
+  { endpoint: api.settings.clearLogo, allowed: ['admin'] },
+  { endpoint: api.settings.readLogo, allowed: all },
 
   { endpoint: api.me.read, status: 200 },
   { endpoint: api.me.update, body: () => ({ language: 'es' }), status: 204 },
@@ -156,6 +215,8 @@ export const cases: Case[] = [
   { endpoint: api.me.endSession, path: { handle: { own: 'nobodys-handle' } }, status: 404 },
   { endpoint: api.auth.signOut, status: 204 },
   { endpoint: api.auth.readSession, status: 200 },
+  { endpoint: api.auth.readSeeing, status: 200 },
+  { endpoint: api.auth.endSeeing, status: 204 },
   { endpoint: api.auth.requestLink, body: () => ({ email: alderPeople.manager.email }), status: 202 },
   { endpoint: api.auth.signIn, body: () => ({ token: 'guessed' }), status: 410 },
   { endpoint: api.system.health, status: 200 },
@@ -179,6 +240,17 @@ export const ingestWithKey: Case = {
 /** Endpoints nobody has told this table how to call. */
 export const uncovered = (): string[] => endpoints.filter((endpoint) => !cases.some((one) => one.endpoint.id === endpoint.id)).map(({ id }) => id);
 
+const shop = {
+  ...{ name: 'Heron Dock', kind: 'bait', street: '9 Ferry Road', city: 'Tern Point', region: 'AR', postalCode: '72600', latitude: 36, longitude: -93 },
+  ...{ timeZone: 'America/Chicago', language: 'en', phone: '', urgentPhone: '', driverNotes: '' },
+  ...{ openHours: [6, 22], receivingHours: [{ days: [1], from: '07:00', to: '11:00' }], deliveryDays: [2] },
+};
+
+function cabinet({ storeId, modelId, productId }: Record<string, unknown>): object {
+  const mount = { channelDropIn: 2, rackIn: 4, headroomIn: 5 };
+  return { storeId, modelId, name: 'Side', placement: 'indoor', condition: '', mount, lanes: [{ productId, widthShare: 1 }] };
+}
+
 function pack({ serial }: Record<string, unknown>): unknown {
   return [
     { bn: `${String(serial)}_`, bt: morning / 1000, n: 'probe1', u: 'm', v: 0.5 },
@@ -190,8 +262,8 @@ function pack({ serial }: Record<string, unknown>): unknown {
 /** One white pixel as PNG. */
 const PIXEL = 'iVBORw0KGgoAAAANSUhEUgAAAAEAAAABCAYAAAAfFcSJAAAADUlEQVR42mP8/5+hHgAHggJ/PchI7wAAAABJRU5ErkJggg==';
 
-function photo(): FormData {
+function picture(field: string): FormData {
   const form = new FormData();
-  form.append('photos', new Blob([Buffer.from(PIXEL, 'base64')], { type: 'image/png' }), 'p.png');
+  form.append(field, new Blob([Buffer.from(PIXEL, 'base64')], { type: 'image/png' }), 'p.png');
   return form;
 }

@@ -101,7 +101,7 @@ async function outsiderFindings(test: TestApp, some: Case[], whom: string): Prom
 const honest = new Map<Case, Map<AlderMember, string>>();
 beforeAll(async () => {
   const alone = await open('alder');
-  for (const one of near(/^(stores|freezers|deliveries|products|requests)\./)) {
+  for (const one of near(/^(accounts|districts|stores|freezers|deliveries|products|models|requests)\./)) {
     const answers = new Map<AlderMember, string>();
     for (const name of PEOPLE) answers.set(name, (await surveyOwn(alone, one, name)).answer);
     honest.set(one, answers);
@@ -180,10 +180,10 @@ describe('doors', () => {
       ...services,
       system: {
         ...services.system,
-        membershipsOf: (id) => {
-          const own = services.system.membershipsOf(id);
-          const every = services.db.select().from(producers).all();
-          return own.flatMap(({ membership }) => every.map((producer) => ({ producer, membership: { ...membership, producerId: producer.id } })));
+        membershipAt: (id, slug) => {
+          const own = services.system.membershipsOf(id)[0];
+          const producer = services.system.producerBySlug(slug);
+          return own && producer && { producer, membership: { ...own.membership, producerId: producer.id } };
         },
       },
     }));

@@ -116,7 +116,10 @@ function foreignOf(own: string): string {
   if (own.startsWith('urn:')) return own.replace('alder', 'birch');
   return birchByAlder.get(own) ?? idOf('birch', 'lantern');
 }
-const THINGS = ['lantern', 'lantern freezer', 'cold request', 'lantern sooner', 'small bag', 'cold request photo'];
+const THINGS = [
+  ...['lantern', 'north', 'south', 'chain', 'corner', 'lantern freezer', 'lantern sensor', 'model', 'small bag'],
+  ...['cold request', 'lantern sooner', 'cold request photo'],
+];
 const birchByAlder = new Map([
   ...THINGS.map((thing): [string, string] => [idOf(alder.namespace, thing), idOf(birch.namespace, thing)]),
   ...(['agent', 'technician'] as const).map((role): [string, string] => [idOf(alder.namespace, role), idOf(birch.namespace, role === 'agent' ? 'strangerAgent' : 'strangerTechnician')]),

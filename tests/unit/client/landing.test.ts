@@ -10,7 +10,7 @@ const member = (role: Role, storeIds: string[] = []): Membership => ({
   storeIds,
   grants: [],
   abilities: [],
-  producer: { slug: 'kestrel-bend', name: 'Kestrel Bend Ice', timeZone: 'America/Chicago', language: 'en', urgentPhone: '555-0100' },
+  producer: { slug: 'kestrel-bend', name: 'Kestrel Bend Ice', timeZone: 'America/Chicago', language: 'en', urgentPhone: '555-0100', logo: null, serviceHours: [], holidays: [] },
 });
 
 describe('every role lands on its most useful page', () => {
@@ -20,10 +20,10 @@ describe('every role lands on its most useful page', () => {
     ['store-manager', [], '/kestrel-bend/stores'],
     ['district-rep', ['s1'], '/kestrel-bend/stores'],
     ['support-agent', [], '/kestrel-bend/requests'],
-    ['dispatcher', [], '/kestrel-bend/stores'],
+    ['dispatcher', [], '/kestrel-bend/freezers'],
     ['driver', ['s1'], '/kestrel-bend/stores?truck=today'],
     ['technician', ['s1'], '/kestrel-bend/requests?assignee=me'],
-    ['producer-admin', [], '/kestrel-bend/stores'],
+    ['producer-admin', [], '/kestrel-bend/freezers'],
   ])('%s with %j', (role, storeIds, path) => {
     expect(landingOf(member(role, storeIds))).toBe(path);
   });

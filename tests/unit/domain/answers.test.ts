@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { answersFor } from '../../../server/domain/answers';
+import { standingOf } from '../../../server/domain/freezer-standing';
 import { dayMs, freezer, hour, minute, now, saturday, state, store, thursday, today } from './store-now';
 
 const full = (over: Parameters<typeof store>[0]) => answersFor(store(over), now).full;
@@ -31,6 +32,12 @@ describe('Full?', () => {
 
   it('says when it runs out where no truck is set', () => {
     expect(full({ nextTruck: null }).said).toMatchObject({ key: 'runs-out', truck: null });
+  });
+
+  it('says nothing of trucks to whoever is not told of them', () => {
+    expect(full({ nextTruck: undefined }).said).toMatchObject({ key: 'runs-out', truck: undefined });
+    const empty = freezer({ state: state({ level: { pounds: 0, sdPounds: 9, capacityPounds: 500, lanes: [{ bags: 0 }] } }) });
+    expect(full({ freezers: [empty], nextTruck: undefined }).said).toMatchObject({ key: 'empty', truck: undefined });
   });
 
   it('takes no truck for coming once its day has a delivery', () => {
@@ -162,10 +169,10 @@ describe('Coming?', () => {
   });
 
   it('tells today before, in and after its window', () => {
-    expect(coming({ nextTruck: today }, today.from - 1).said.key).toBe('today');
-    expect(coming({ nextTruck: today }, today.from).said.key).toBe('in-window');
-    expect(coming({ nextTruck: today }, today.to).said.key).toBe('in-window');
-    expect(coming({ nextTruck: today }, today.to + 20 * minute).said).toEqual({ key: 'late', bags: 96, dueBy: today.to, lateMs: 20 * minute });
+    expect(coming({ nextTruck: today }, today.from - 1)?.said.key).toBe('today');
+    expect(coming({ nextTruck: today }, today.from)?.said.key).toBe('in-window');
+    expect(coming({ nextTruck: today }, today.to)?.said.key).toBe('in-window');
+    expect(coming({ nextTruck: today }, today.to + 20 * minute)?.said).toEqual({ key: 'late', bags: 96, dueBy: today.to, lateMs: 20 * minute });
   });
 
   it('tells a truck of a past day without a delivery as missed', () => {
@@ -175,16 +182,28 @@ describe('Coming?', () => {
   it('tells what was delivered today, and the truck after it', () => {
     const delivered = { at: now - hour, lines: [{ bags: 40 }, { bags: 24 }] };
     expect(coming({ nextTruck: today, deliveries: [delivered] })).toEqual({ value: null, said: { key: 'delivered', at: now - hour, bags: 64, next: null } });
-    expect(coming({ deliveries: [delivered] }).said).toMatchObject({ key: 'delivered', next: { day: '2026-12-03', bags: 96 } });
+    expect(coming({ deliveries: [delivered] })?.said).toMatchObject({ key: 'delivered', next: { day: '2026-12-03', bags: 96 } });
   });
 
   it('counts today in the time zone of the store', () => {
     // 23:30 of the day before in Chicago is already December 1 in UTC.
     const lastNight = { at: Date.UTC(2026, 11, 1, 5, 30), lines: [{ bags: 10 }] };
-    expect(coming({ deliveries: [lastNight] }).said.key).toBe('ahead');
+    expect(coming({ deliveries: [lastNight] })?.said.key).toBe('ahead');
+  });
+
+  it('has no answer for whoever is not told of trucks', () => {
+    expect(coming({ nextTruck: undefined })).toBeNull();
+    expect(coming({ nextTruck: undefined, deliveries: [{ at: now - hour, lines: [{ bags: 40 }] }] })).toBeNull();
   });
 
   it('tells the usual days where no truck is set', () => {
     expect(coming({ nextTruck: null })).toEqual({ value: null, said: { key: 'none', deliveryDays: [2, 4] } });
+  });
+});
+
+describe('A standing', () => {
+  it('counts on no truck, and on none missing, where trucks are not told', () => {
+    const standing = (truck: null | undefined) => standingOf(freezer(), truck, now, 'America/Chicago').kind;
+    expect([standing(null), standing(undefined)]).toEqual(['runs-out', 'runs-out-untold']);
   });
 });

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { foldState } from '../../../server/domain/freezer-state';
+import { foldReadings } from '../../../server/domain/freezer-state';
 import type { FreezerSetup, Reading } from '../../../server/domain/types';
 
 const HALF_HOUR = 1_800_000;
@@ -21,7 +21,7 @@ const twoLanes: FreezerSetup = {
 type Distances = (number | null)[];
 const fold = (setup: FreezerSetup, distances: Distances[]) => {
   const readings = distances.map((distancesIn, i): Reading => ({ at: start + i * HALF_HOUR, distancesIn, airF: 18, supplyV: 12 }));
-  const state = foldState({ setup, timeZone: 'America/Chicago', readings });
+  const state = foldReadings({ setup, timeZone: 'America/Chicago', readings })?.state;
   if (!state) throw new Error('no state');
   return { ...state, seenAt: state.deliveries.map(({ at }) => (at - start) / HALF_HOUR), soldADay: state.rates.map(({ poundsPerDay }) => poundsPerDay) };
 };

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { foldState } from '../../../server/domain/freezer-state';
+import { foldReadings } from '../../../server/domain/freezer-state';
 import type { FreezerSetup, Reading } from '../../../server/domain/types';
 
 const HALF_HOUR = 1_800_000;
@@ -29,7 +29,7 @@ const days = Array.from({ length: 8 * 48 }, (_, i) => {
   const since = truck ? i - (6 * 48 + 20) : i;
   return reading(i, (truck ? 400 : 390) - since, (truck ? 400 : 380) - since / 2);
 });
-const fold = (readings: Reading[]) => foldState({ setup, timeZone, readings });
+const fold = (readings: Reading[]) => foldReadings({ setup, timeZone, readings })?.state ?? null;
 
 describe('the state of a freezer', () => {
   test('one reading: its level, and nothing claimed that takes days', () => {
@@ -114,7 +114,7 @@ describe('the state of a freezer', () => {
     let known = 0;
     fc.assert(
       fc.property(anySetup, fc.array(anyReading, { maxLength: 60 }), (given, readings) => {
-        const state = foldState({ setup: given, timeZone, readings });
+        const state = foldReadings({ setup: given, timeZone, readings })?.state ?? null;
         if (state) known += 1;
         expect(isSound(state)).toBe(true);
       }),
@@ -137,6 +137,6 @@ describe('the state of a freezer', () => {
   });
 
   test('a setup that cannot be gives no state', () => {
-    expect(foldState({ setup: { ...setup, lanes: [] }, timeZone, readings: days })).toBeNull();
+    expect(foldReadings({ setup: { ...setup, lanes: [] }, timeZone, readings: days })).toBeNull();
   });
 });

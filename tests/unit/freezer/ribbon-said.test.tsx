@@ -47,3 +47,8 @@ test('in Spanish, with no truck and nothing known, it says so', async () => {
   expect(sentence).toBe('No se sabe cuánto hay ahora. Todavía no hay camión programado.');
   expect(points).toEqual([]);
 });
+
+test('who is not told of trucks hears nothing of them', async () => {
+  const { sentence } = await said('en', { ...data, forecast: [], truck: undefined, empty: null });
+  expect(sentence).toBe('Now 20% full.');
+});
