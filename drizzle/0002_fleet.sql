@@ -32,16 +32,19 @@ CREATE TABLE `freezer_day` (
 	`id` text NOT NULL,
 	`producer_id` text NOT NULL,
 	`freezer_id` text NOT NULL,
+	`store_id` text NOT NULL,
 	`day` text NOT NULL,
 	`out_minutes` real NOT NULL,
 	`warm_minutes` real NOT NULL,
 	`known_minutes` real NOT NULL,
 	PRIMARY KEY(`producer_id`, `id`),
 	FOREIGN KEY (`producer_id`) REFERENCES `producer`(`id`) ON UPDATE no action ON DELETE no action,
-	FOREIGN KEY (`producer_id`,`freezer_id`) REFERENCES `freezer`(`producer_id`,`id`) ON UPDATE no action ON DELETE no action
+	FOREIGN KEY (`producer_id`,`freezer_id`) REFERENCES `freezer`(`producer_id`,`id`) ON UPDATE no action ON DELETE no action,
+	FOREIGN KEY (`producer_id`,`store_id`) REFERENCES `store`(`producer_id`,`id`) ON UPDATE no action ON DELETE no action
 );
 --> statement-breakpoint
-CREATE INDEX `freezer_day_freezer` ON `freezer_day` (`producer_id`,`freezer_id`,`day`,`out_minutes`,`warm_minutes`,`known_minutes`);--> statement-breakpoint
+CREATE INDEX `freezer_day_freezer` ON `freezer_day` (`producer_id`,`freezer_id`,`day`);--> statement-breakpoint
+CREATE INDEX `freezer_day_store` ON `freezer_day` (`producer_id`,`store_id`,`day`,`out_minutes`,`warm_minutes`,`known_minutes`);--> statement-breakpoint
 ALTER TABLE `freezer` ADD `version` integer DEFAULT 1 NOT NULL;--> statement-breakpoint
 CREATE INDEX `freezer_model` ON `freezer` (`producer_id`,`model_id`);--> statement-breakpoint
 ALTER TABLE `model` ADD `version` integer DEFAULT 1 NOT NULL;--> statement-breakpoint

@@ -66,7 +66,7 @@ export function buildApp(services: Services, clientFolder: string): Express {
   // Answers are not kept by browsers, so nobody asks whether they changed; files have their own.
   app.set('etag', false);
   app.use(securityHeaders(config.baseUrl.startsWith('https:')));
-  app.use(compression());
+  app.use(compressed());
   app.use(['/api', '/dev'], refuseCrossSite(config.baseUrl), limit({ seconds: 60, most: 6000, key: addressOf }, hasDevDoors(config.mode) ? patience * 20 : patience));
   app.use(['/api', '/dev'], (_req, res, next) => {
     res.set('cache-control', 'no-store');
@@ -79,6 +79,12 @@ export function buildApp(services: Services, clientFolder: string): Express {
   app.use((_req, _res, next) => next(problem('not-found')));
   app.use(problemHandler(log, newId));
   return app;
+}
+
+/** Whoever takes nothing compressed needs no look at what could be. */
+function compressed(): RequestHandler {
+  const compress = compression();
+  return (req, res, next) => (req.headers['accept-encoding'] === undefined ? next() : compress(req, res, next));
 }
 
 /** What a page may load: nothing but our own, and no script or style inside a page. Said once, since it never changes. */

@@ -8,8 +8,8 @@ import { accounts, fleetRows, freezers, freezerStates, installs, lanes, nextTruc
 /** Sorts after every time there is. */
 export const NEVER = 8.64e15;
 
-/** Which freezers to write anew: one, or those of a store, an account or a district. */
-export type FleetPart = { freezerId: string } | { storeId: string } | { accountId: string } | { districtId: string };
+/** Which freezers to write anew: one, or those of a store or an account. */
+export type FleetPart = { freezerId: string } | { storeId: string } | { accountId: string };
 
 /** Writes anew how lists show freezers, and takes out those no longer in use. */
 export function writeFleetRows(db: ProducerDb, part: FleetPart): void {
@@ -22,8 +22,7 @@ export function writeFleetRows(db: ProducerDb, part: FleetPart): void {
 function wherePart(part: FleetPart): SQL {
   if ('freezerId' in part) return sql`f.id = ${part.freezerId}`;
   if ('storeId' in part) return sql`f.store_id = ${part.storeId}`;
-  if ('accountId' in part) return sql`s.account_id = ${part.accountId}`;
-  return sql`s.district_id = ${part.districtId}`;
+  return sql`s.account_id = ${part.accountId}`;
 }
 
 interface SourceRow extends Omit<FleetRow, 'lanes' | 'truck' | 'riskAt'> {
@@ -84,16 +83,22 @@ function writeRow(db: ProducerDb, row: SourceRow): void {
 
 /** The answer's own JSON. */
 function bodyOf(row: SourceRow): string {
-  const { id, name, assetNumber, storeId, store, city, accountNumber, timeZone, serial, at, pounds, share, airF, warmSince, early, likely, late } = row;
+  const { id, name, assetNumber, storeId, store, city, accountNumber, timeZone, serial, at, warmSince, early, likely, late } = row;
   const truck = row.truckFrom === null || row.truckTo === null ? null : { from: row.truckFrom, to: row.truckTo };
   const body: FleetRow = {
-    ...{ id, name, assetNumber, storeId, store, city, accountNumber, timeZone, serial, at, pounds, share, airF, warmSince, early, likely, late },
+    ...{ id, name, assetNumber, storeId, store, city, accountNumber, timeZone, serial, at, warmSince, early, likely, late },
+    pounds: rounded(row.pounds, 1),
+    share: rounded(row.share, 3),
+    airF: rounded(row.airF, 1),
     riskAt: riskAt(row, row.riskLimit),
     truck,
     lanes: lanesOf(row),
   };
   return JSON.stringify(body);
 }
+
+/** No more digits than a list could show. */
+const rounded = (value: number | null, digits: number): number | null => (value === null ? null : Number(value.toFixed(digits)));
 
 interface LaneLevel {
   bags: number;
@@ -107,7 +112,7 @@ function lanesOf({ lanes: names, levels }: SourceRow): FleetRow['lanes'] {
   return (JSON.parse(names) as string[]).map((product, i) => {
     const level = known[i];
     if (!level) return { product, bags: null, share: null };
-    return { product, bags: level.bags, share: level.capacityPounds > 0 ? level.pounds / level.capacityPounds : 0 };
+    return { product, bags: level.bags, share: rounded(level.capacityPounds > 0 ? level.pounds / level.capacityPounds : 0, 3) };
   });
 }
 

@@ -179,7 +179,8 @@ function keptProducers(db: Database): (id: string, version: number) => Producer 
     if (known?.version === version) return known;
     const read = db.select().from(producers).where(eq(producers.id, id)).get();
     if (!read) throw new Error('a membership of no producer');
-    kept.set(id, read);
+    // What a transaction wrote may yet be undone.
+    if (!db.$client.inTransaction) kept.set(id, read);
     return read;
   };
 }

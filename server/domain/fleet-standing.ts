@@ -10,7 +10,8 @@ export interface FleetGlance {
   warmSince: number | null;
   likely: number | null;
   riskAt: number | null;
-  truck: { from: number; to: number } | null;
+  /** Undefined for whoever is told nothing of trucks. */
+  truck: { from: number; to: number } | null | undefined;
 }
 
 export type FleetStanding =
@@ -25,6 +26,8 @@ export type FleetStanding =
   | { kind: 'tight' }
   /** Likely empty within two days, and no truck to come. */
   | { kind: 'soon' }
+  /** The same for whoever is told nothing of trucks. */
+  | { kind: 'soon-untold' }
   | { kind: 'silent'; since: number }
   | { kind: 'fine' };
 
@@ -53,8 +56,8 @@ export const comingTruck = <T extends { to: number }>(truck: T | null, now: numb
 const emptyLanes = ({ lanes }: FleetGlance): string[] => lanes.flatMap(({ product, bags }) => (bags === 0 ? [product] : []));
 
 function againstTruck({ likely, riskAt, truck }: FleetGlance, now: number): FleetStanding {
-  const coming = comingTruck(truck, now);
-  if (!coming) return likely !== null && likely < now + SOON_MS ? { kind: 'soon' } : { kind: 'fine' };
+  const coming = comingTruck(truck ?? null, now);
+  if (!coming) return likely !== null && likely < now + SOON_MS ? { kind: truck === undefined ? 'soon-untold' : 'soon' } : { kind: 'fine' };
   if (likely !== null && likely < coming.from) return { kind: 'first', ms: coming.from - likely };
   return riskAt !== null && riskAt < coming.from ? { kind: 'tight' } : { kind: 'fine' };
 }

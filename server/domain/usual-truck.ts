@@ -15,23 +15,25 @@ export interface TruckWindow {
   to: string;
 }
 
-/** The next of a store's usual delivery days whose window has not ended; null where it has none. */
+/** The next window of a store's usual delivery days that has not ended; null where it has none. */
 export function usualTruck(store: UsualDays, now: number): TruckWindow | null {
   const today = dayOf(now, store.timeZone);
-  // Today's window may have ended, so the same day of next week counts too.
+  // Today's windows may have ended, so the same day of next week counts too.
   for (let ahead = 0; ahead <= 7; ahead += 1) {
     const day = addDays(today, ahead);
-    const window = store.deliveryDays.includes(weekdayOf(day)) ? windowOf(store, weekdayOf(day)) : null;
-    if (window && instantOf(day, window.to, store.timeZone) > now) return { day, ...window };
+    const coming = store.deliveryDays.includes(weekdayOf(day)) && windowsOf(store, weekdayOf(day)).find(({ to }) => instantOf(day, to, store.timeZone) > now);
+    if (coming) return { day, ...coming };
   }
   return null;
 }
 
-/** The first of the day's receiving hours, else the hours in which the store is open. */
-function windowOf({ receivingHours, openHours: [opens, closes] }: UsualDays, weekday: number): Omit<TruckWindow, 'day'> | null {
-  const [first] = receivingHours.filter(({ days }) => days.some((day) => day === weekday)).sort((a, b) => a.from.localeCompare(b.from));
-  if (first) return { from: first.from, to: first.to };
-  return closes > opens ? { from: clock(opens), to: clock(closes) } : null;
+type Hours = Omit<TruckWindow, 'day'>;
+
+/** The day's receiving hours, earliest first, else the hours in which the store is open. */
+function windowsOf({ receivingHours, openHours: [opens, closes] }: UsualDays, weekday: number): Hours[] {
+  const receiving = receivingHours.filter(({ days }) => days.some((day) => day === weekday)).map(({ from, to }) => ({ from, to }));
+  if (receiving.length > 0) return receiving.sort((a, b) => a.from.localeCompare(b.from));
+  return closes > opens ? [{ from: clock(opens), to: clock(closes) }] : [];
 }
 
 const LAST_MINUTE = 24 * 60 - 1;

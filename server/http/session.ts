@@ -61,6 +61,11 @@ class SqliteSessions extends Store {
       const now = this.now();
       const { personId, handle = randomBytes(9).toString('base64url'), device = '', startedAt = now } = data;
       const row = { data: JSON.stringify({ ...data, seenAt: undefined, handle, startedAt }), seenAt: now, expiresAt: expiry(data, now) };
+      if (data.seenAt !== undefined) {
+        // It was read before this; if it has ended meanwhile, it stays ended.
+        this.db.update(sessions).set(row).where(eq(sessions.id, hash(sid))).run();
+        return;
+      }
       this.db
         .insert(sessions)
         .values({ id: hash(sid), personId, handle, device, createdAt: startedAt, ...row })

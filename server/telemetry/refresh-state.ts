@@ -2,7 +2,6 @@ import { and, desc, eq, freezerDays, freezers, freezerStates, gte, installs, isN
 import { freezersView } from '../db/views/freezers';
 import { recentReadings } from '../db/views/readings';
 import { foldReadings, type Folded, type FreezerState } from '../domain/freezer-state';
-import type { FreezerDay } from '../domain/freezer-days';
 import type { Reading } from '../domain/types';
 import { celsiusToFahrenheit, metresToInches } from '../domain/units';
 
@@ -14,7 +13,7 @@ export function refreshState(db: Database, scoped: ProducerDb, freezerId: string
   const folded = foldOf(db, scoped, freezerId, Number.MAX_SAFE_INTEGER);
   if (folded) {
     keepState(scoped, freezerId, folded.state);
-    keepDays(scoped, freezerId, folded.days);
+    keepDays(scoped, folded);
   } else {
     scoped.delete(freezerStates, eq(freezerStates.id, freezerId));
   }
@@ -24,18 +23,24 @@ export function refreshState(db: Database, scoped: ProducerDb, freezerId: string
 /** Keeps the days before `until`, for readings that came in from a past longer than a state looks back. */
 export function refreshDays(db: Database, scoped: ProducerDb, freezerId: string, until: number): void {
   const folded = foldOf(db, scoped, freezerId, until);
-  if (folded) keepDays(scoped, freezerId, folded.days);
+  if (folded) keepDays(scoped, folded);
 }
 
-function foldOf(db: Database, scoped: ProducerDb, freezerId: string, until: number): Folded | null {
+interface FreezerFolded extends Folded {
+  freezerId: string;
+  storeId: string;
+}
+
+function foldOf(db: Database, scoped: ProducerDb, freezerId: string, until: number): FreezerFolded | null {
   const [freezer] = freezersView(scoped, sql`${freezers.id} = ${freezerId}`, sql`${freezers.id}`, 1);
   const install = currentInstall(scoped, freezerId);
   if (!freezer || !install) return null;
-  return foldReadings({
+  const folded = foldReadings({
     setup: { model: freezer.model, mount: { ...freezer.mount, probesIn: install.probesIn }, lanes: freezer.lanes },
     timeZone: freezer.timeZone,
     readings: readingsOf(db, install, until),
   });
+  return folded && { ...folded, freezerId, storeId: freezer.storeId };
 }
 
 function keepState(scoped: ProducerDb, id: string, state: FreezerState): void {
@@ -54,15 +59,15 @@ function keepState(scoped: ProducerDb, id: string, state: FreezerState): void {
   scoped.upsert(freezerStates, { id, ...row }, row);
 }
 
-/** A day is written over by one of which at least as much is known, so the window's cut first day spoils none. */
-function keepDays(scoped: ProducerDb, freezerId: string, days: FreezerDay[]): void {
+/** A day is written over by one of which at least as much is known, so the window's cut first day spoils none; it stays where it was lived. */
+function keepDays(scoped: ProducerDb, { freezerId, storeId, days }: FreezerFolded): void {
   const known = new Map(daysSince(scoped, freezerId, days[0]?.day ?? '').map((row) => [row.day, row]));
   for (const { day, out, warm, known: knownMinutes } of days) {
     const before = known.get(day);
     const row = { outMinutes: out, warmMinutes: warm, knownMinutes };
     const same = before && before.outMinutes === out && before.warmMinutes === warm && before.knownMinutes === knownMinutes;
     if (same || (before && before.knownMinutes > knownMinutes)) continue;
-    scoped.upsert(freezerDays, { id: `${freezerId} ${day}`, freezerId, day, ...row }, row);
+    scoped.upsert(freezerDays, { id: `${freezerId} ${day}`, freezerId, storeId, day, ...row }, row);
   }
 }
 

@@ -42,8 +42,16 @@ export function Form<V extends FieldValues, S extends FieldValues, N extends Fie
   );
 }
 
-const Refused = <N extends FieldValues>({ problem, meanwhile }: { problem: Problem; meanwhile: Meanwhile<N> | undefined }) =>
-  meanwhile && problem.type === 'changed-meanwhile' ? <ChangedMeanwhile problem={problem} {...meanwhile} /> : <ProblemNote problem={problem} />;
+/** At the top of the form, where whoever pressed the button below is brought. */
+function Refused<N extends FieldValues>({ problem, meanwhile }: { problem: Problem; meanwhile: Meanwhile<N> | undefined }) {
+  const box = useRef<HTMLDivElement>(null);
+  useEffect(() => box.current?.focus(), [problem]);
+  return (
+    <div ref={box} tabIndex={-1} className="grid gap-4">
+      {meanwhile && problem.type === 'changed-meanwhile' ? <ChangedMeanwhile problem={problem} {...meanwhile} /> : <ProblemNote problem={problem} />}
+    </div>
+  );
+}
 
 /** Every fault in one place, each leading to its field. */
 function Summary({ faults, tries }: { faults: FieldError[]; tries: number }) {

@@ -1,10 +1,11 @@
 import { useRef } from 'react';
 import { Plus, X } from 'lucide-react';
-import { useFieldArray, useFormContext } from 'react-hook-form';
+import { useFieldArray } from 'react-hook-form';
 import type { Span } from '../../server/contract/words';
 import { Button, IconButton } from '../ui/button';
+import { FieldError } from '../ui/field';
 import { TextField } from './text-field';
-import { useFaultWords } from './use-fault-words';
+import { useListFault } from './use-list-fault';
 import { WeekdaysField } from './weekdays-field';
 
 /** What the spans are called where they are asked for. */
@@ -33,22 +34,19 @@ const usual: Span = { days: [1, 2, 3, 4, 5], from: '07:00', to: '15:00' };
 
 /** Hours on days of the week: any number of spans, each with its days and from when to when. */
 export function SpansField({ name, labels }: Props) {
-  const say = useFaultWords();
   const adder = useRef<HTMLButtonElement>(null);
-  const { formState, getFieldState } = useFormContext();
   const { fields, append, remove } = useFieldArray({ name });
-  const { error } = getFieldState(name, formState);
-  const message = error?.message ?? error?.root?.message;
+  const { fault, faultId } = useListFault(name);
   const take = (i: number) => {
     remove(i);
     // The pressed button is gone with its span.
     adder.current?.focus();
   };
   return (
-    <fieldset className="min-w-0">
+    <fieldset className="min-w-0" aria-describedby={faultId}>
       <legend className="font-semibold">{labels.legend}</legend>
       {labels.hint && <p className="text-body text-ink-3">{labels.hint}</p>}
-      {message && <p className="font-semibold text-rust">{say(message)}</p>}
+      {faultId && <FieldError id={faultId}>{fault}</FieldError>}
       {fields.length === 0 && <p className="mt-1 text-ink-2">{labels.none}</p>}
       <div className="mt-2 grid gap-3 empty:hidden">
         {fields.map(({ id }, i) => (

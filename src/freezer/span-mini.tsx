@@ -12,7 +12,7 @@ interface Props {
 
 const days = 7;
 const dayLong = 86_400_000;
-const width = 184;
+const width = 152;
 const height = 26;
 const pad = 6;
 const floor = 17;
@@ -25,7 +25,7 @@ export function SpanMini({ now, early, likely, late, truck, trouble, label }: Pr
   const x = (at: number) => pad + Math.min(1, Math.max(0, share(at))) * inner;
   const from = early ?? likely;
   return (
-    <svg role="img" aria-label={label} width={width} height={height} viewBox={`0 0 ${width} ${height}`} className="block max-w-full">
+    <svg role="img" aria-label={label} width={width} height={height} viewBox={`0 0 ${width} ${height}`} className="block">
       <path d={`M${pad} ${floor}H${end}`} className="stroke-edge" />
       {Array.from({ length: days + 1 }, (_, i) => (
         <path key={i} d={`M${pad + (i / days) * inner} ${floor - 3}v6`} className="stroke-edge" />

@@ -66,6 +66,7 @@ function Sections({ member }: { member: Membership }) {
     <nav aria-label={t('nav.label')} className="flex gap-1 px-2 sm:px-4">
       <SectionLink to={store ? paths.store(slug, store) : paths.stores(slug)} label={store ? t('nav.store') : t('nav.stores')} />
       <SectionLink to={paths.requests(slug)} label={t('nav.requests')} />
+      {member.role === 'district-rep' && <SectionLink to={paths.comparison(slug)} label={t('nav.comparison')} />}
     </nav>
   );
 }

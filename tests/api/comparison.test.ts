@@ -23,7 +23,7 @@ const lanternOf = async (who: AlderPerson): Promise<ComparedStore> => {
   return found;
 };
 const daySaid = (freezer: string, date: string, [outMinutes, warmMinutes, knownMinutes]: [number, number, number]) =>
-  alderDb.insert(freezerDays, { id: `${id(freezer)} ${date}`, freezerId: id(freezer), day: date, outMinutes, warmMinutes, knownMinutes });
+  alderDb.insert(freezerDays, { id: `${id(freezer)} ${date}`, freezerId: id(freezer), storeId: alderDb.find(freezers, id(freezer))?.storeId ?? '', day: date, outMinutes, warmMinutes, knownMinutes });
 
 /** A second freezer at lantern, with or without a sensor. */
 function secondFreezer({ fitted }: { fitted: boolean }): void {
@@ -130,4 +130,11 @@ describe('the comparison as a file', () => {
   test('holds the stores searched for', async () => {
     expect((await file('agent', '?q=unip')).trimEnd().split('\r\n').slice(1)).toEqual([expect.stringMatching(/^juniper/)]);
   });
+});
+
+test('days stay with the store where a freezer stood', async () => {
+  daySaid('lantern freezer', '2026-11-20', [720, 0, 1440]);
+  await browserOf(server, alderPeople.admin).patch(`/api/alder-ice/freezers/${id('lantern freezer')}`).send({ version: 1, storeId: id('juniper') }).expect(200);
+  expect((await lanternOf('admin')).outDays).toBe(0.5);
+  expect((await compare('admin')).find((store) => store.id === id('juniper'))?.outDays).toBe(0);
 });

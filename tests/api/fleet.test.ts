@@ -139,6 +139,38 @@ test('a rep and a manager see their own, whatever they ask for', async () => {
   expect(body.all).toBe(1);
 });
 
+test('a technician is told of their stores, and nothing of trucks', async () => {
+  await bed.undone(async () => {
+    const technician = browserOf(bed, alderPeople.technician);
+    const body = async (path: string, agent: Agent) => (await agent.get(`${at}/${path}`).expect(200)).body;
+    const fileOf = async (agent: Agent): Promise<string[][]> => parse((await agent.get(`${at}/freezers.csv?store=${id('lantern')}`).expect(200)).text, { bom: true });
+    // Before its truck, and yet in three days.
+    own.update(nextTrucks, id('lantern truck'), { from: morning + 4 * day, to: morning + 4 * day + hour });
+    say('lantern', { likely: morning + 3 * day });
+    expect((await listed(`?store=${id('lantern')}`))[0]).toMatchObject({ truck: { from: morning + 4 * day }, riskAt: expect.any(Number) });
+    expect(storesOf(await listed('?show=first'))).toContain('lantern');
+
+    const told = await listed('', technician);
+    expect(storesOf(told)).toEqual(['lantern']);
+    expect(told[0]).toMatchObject({ truck: null, riskAt: null, likely: morning + 3 * day });
+    expect(await listed('?show=first', technician)).toEqual([]);
+    expect((await body('freezer-digest', technician)).first).toBe(0);
+    expect((await body('freezer-map', technician)).stores[0].mark).toBe('fine');
+    const heads = (await fileOf(technician))[0];
+    expect(heads?.filter((head) => head.includes('amión'))).toEqual([]);
+    expect((await fileOf(dispatcher))[0]).toContain('Next truck from');
+
+    // Within two days, and yet after its truck.
+    own.update(nextTrucks, id('lantern truck'), { from: morning + hour, to: morning + 2 * hour });
+    say('lantern', { likely: morning + 2 * day - 1 });
+    expect(storesOf(await listed('?show=first'))).not.toContain('lantern');
+    expect(storesOf(await listed('?show=first', technician))).toEqual(['lantern']);
+    expect((await body('freezer-digest', technician)).first).toBe(1);
+    expect((await body('freezer-map', technician)).stores[0].mark).toBe('first');
+    expect((await fileOf(technician))[1]).toContain('Se acaba pronto');
+  });
+});
+
 test('the map says the same by store, the worst first', async () => {
   await bed.undone(async () => {
     say('lantern', { likely: morning + 9 * day });

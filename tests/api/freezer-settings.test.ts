@@ -212,6 +212,13 @@ describe('tying a sensor', () => {
     expect(trailOf(juniper)[0]).toEqual({ act: 'tie-sensor', changes: { sensorId: null } });
   });
 
+  test('out of a freezer they may not see a technician takes none', async () => {
+    const body = { sensorId: id('juniper sensor'), probesIn: [12, 35, 58], move: true };
+    const tried = await browserOf(server, alderPeople.technician).put(`/api/${alder.slug}/freezers/${front}/sensor`).send(body).expect(409);
+    expect(tried.body).toMatchObject(problemOf('sensor-elsewhere'));
+    expect(hung(id('juniper freezer'))).toMatchObject([{ to: null }]);
+  });
+
   test('again with other probes begins anew; with the same ones nothing begins', async () => {
     server.clock.now += hour;
     const own = { sensorId: id('lantern sensor') };

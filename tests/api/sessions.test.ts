@@ -1,3 +1,4 @@
+import http from 'node:http';
 import { afterEach, beforeEach, describe, expect, test } from 'vitest';
 import { and, eq, memberships, membershipScopes, people, sessions } from '../../server/db';
 import { acrossProducers } from '../../server/db/statement-hook';
@@ -127,7 +128,28 @@ describe('rights are those of now', () => {
   });
 });
 
+/** Asks for something with its body still to come, and sends that after `meanwhile`. */
+const slowly = (path: string, cookie: string, meanwhile: () => void): Promise<number> =>
+  new Promise((resolve, reject) => {
+    const headers = { cookie, 'sec-fetch-site': 'same-origin', 'content-type': 'application/json', 'content-length': 2 };
+    const asked = http.request(`${server.url}${path}`, { method: 'POST', headers }, (answer) => resolve(answer.resume().statusCode ?? 0));
+    asked.on('error', reject);
+    asked.write('{', () => setTimeout(() => {
+      meanwhile();
+      asked.end('}');
+    }, 100));
+  });
+
 describe('own sessions', () => {
+  test('one that ends while it is being used stays ended', async () => {
+    const cookie = cookieOf(server, alderPeople.admin.email);
+    const ended = () => void server.db.delete(sessions).where(eq(sessions.id, hash(`session-of-${alderPeople.admin.email}`))).run();
+    // Whom it sees as is written into the session, which is gone by then.
+    expect(await slowly(`/api/alder-ice/people/${idOf('alder', 'manager')}/view`, cookie, ended)).toBe(204);
+    await browser(server).get('/api/me').set('cookie', cookie).expect(401);
+    expect(server.db.select().from(sessions).all()).toEqual([]);
+  });
+
   test('are listed with their device, and any of them can be ended', async () => {
     const phone = browser(server).set('user-agent', 'Mozilla/5.0 (iPhone) Safari');
     await signIn(server, phone, alderPeople.manager);

@@ -38,6 +38,16 @@ test('who saw an older version is told, and changes nothing', async () => {
   });
 });
 
+test('what is said again as it was is no change', async () => {
+  await bed.undone(async () => {
+    const { hasLogo: _hasLogo, ...whole } = (await admin.get(`${at}/settings`).expect(200)).body;
+    await admin.patch(`${at}/settings`).send({ ...whole, urgentPhone: '555-0177' }).expect(200);
+    const { body } = await admin.get(`${at}/audit?subject=Settings`).expect(200);
+    expect(body.entries[0].act).toBe('change-settings');
+    expect(JSON.parse(body.entries[0].changes)).toEqual({ urgentPhone: '555-0177' });
+  });
+});
+
 test.each([
   ['/timeZone', { timeZone: 'Mars/Olympus' }, 'time-zone'],
   ['/riskLimit', { riskLimit: 0.9 }, 'risk-limit'],

@@ -129,6 +129,7 @@ describe('rules', () => {
     ['a store manager may read notes to staff', /^requests\.read/, 'manager', (ability, { role }) => role === 'store-manager' && add(ability, 'read', 'Note')],
     ['a district rep sees every store', /^stores\.read/, 'storeRep', (ability, { role }) => role === 'district-rep' && add(ability, 'read', 'Store')],
     ['a technician sees trucks', /^stores\./, 'technician', (ability, { role }) => role === 'technician' && add(ability, 'read', 'NextTruck')],
+    ['a technician sees trucks in the fleet', /^freezers\.list/, 'technician', (ability, { role }) => role === 'technician' && add(ability, 'read', 'NextTruck')],
     ['a driver may cancel requests', /^requests\.cancel/, 'driver', (ability, { role }) => role === 'driver' && add(ability, 'cancel', 'Request')],
     ['everybody may everything', /^products/, 'manager', (ability) => add(ability, 'read', 'Product')],
   ];

@@ -148,7 +148,7 @@ const ALWAYS_ELSEWHERE = ['body.freezerId', 'path.photoId'];
 function wordsHiddenFrom(name: AlderMember): string[] {
   const words = [birch.mark, twin.mark];
   if (['manager', 'otherManager', 'managerOfThree', 'storeRep'].includes(name)) words.push(noteWord);
-  if (name === 'technician') words.push(lotWord, '"nextTruck":{"day"', '"nextTruck":{"from"');
+  if (name === 'technician') words.push(lotWord, '"nextTruck":{"day"', '"nextTruck":{"from"', '"truck":{"from"');
   return words;
 }
 

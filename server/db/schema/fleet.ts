@@ -50,11 +50,19 @@ export const freezerDays = sqliteTable(
   {
     ...owned(),
     freezerId: text().notNull(),
+    /** Where it stood then. */
+    storeId: text().notNull(),
     day: text().notNull(),
     /** Minutes in which some lane held no whole bag, in which the air was warm, and of which anything is known. */
     outMinutes: real().notNull(),
     warmMinutes: real().notNull(),
     knownMinutes: real().notNull(),
   },
-  (t) => [ownedKey(t), ownedRef(t, t.freezerId, freezers), index('freezer_day_freezer').on(t.producerId, t.freezerId, t.day, t.outMinutes, t.warmMinutes, t.knownMinutes)],
+  (t) => [
+    ownedKey(t),
+    ownedRef(t, t.freezerId, freezers),
+    ownedRef(t, t.storeId, stores),
+    index('freezer_day_freezer').on(t.producerId, t.freezerId, t.day),
+    index('freezer_day_store').on(t.producerId, t.storeId, t.day, t.outMinutes, t.warmMinutes, t.knownMinutes),
+  ],
 );

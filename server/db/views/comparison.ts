@@ -51,11 +51,10 @@ export interface StoreMinutes {
 export function minutesOfStores(db: ProducerDb, ids: string[], since: Since): Map<string, StoreMinutes> {
   const days = db.view<StoreMinutes & { store: string }>(
     (producer) => sql`
-    select f.store_id as store, max(fd.out_minutes) as out, max(fd.warm_minutes) as warm, sum(fd.known_minutes) as known
+    select fd.store_id as store, max(fd.out_minutes) as out, max(fd.warm_minutes) as warm, sum(fd.known_minutes) as known
     from json_each(${JSON.stringify(ids)})
-    cross join ${freezers} f on f.producer_id = ${producer} and f.store_id = json_each.value
-    cross join ${freezerDays} fd on fd.producer_id = ${producer} and fd.freezer_id = f.id and fd.day >= ${since.day}
-    group by f.store_id, fd.day`,
+    cross join ${freezerDays} fd on fd.producer_id = ${producer} and fd.store_id = json_each.value and fd.day >= ${since.day}
+    group by fd.store_id, fd.day`,
   );
   const minutes = new Map<string, StoreMinutes>();
   for (const { store, out, warm, known } of days) {

@@ -17,6 +17,8 @@ export interface FleetSelection {
   account?: string;
   store?: string;
   show?: FleetShow;
+  /** Whether the viewer is told of trucks; if not, only a run-out within two days counts as near. */
+  trucks: boolean;
   now: number;
 }
 
@@ -62,7 +64,7 @@ export function placed(json: string): Placed {
 /** How many there are of each kind, whatever the list is narrowed to. */
 export function fleetDigest(db: ProducerDb, selection: FleetSelection): FleetDigest {
   const where = conditions(db, selection);
-  const count = (show: FleetShow) => sql`coalesce(sum(${showing(show, selection.now)}), 0)`;
+  const count = (show: FleetShow) => sql`coalesce(sum(${showing(show, selection)}), 0)`;
   const [digest] = db.view<FleetDigest>(
     (producer) => sql`
     select count(*) as "all", ${count('first')} as "first", ${count('warm')} as warm, ${count('silent')} as silent, ${count('unfitted')} as unfitted
@@ -75,8 +77,8 @@ export function fleetDigest(db: ProducerDb, selection: FleetSelection): FleetDig
 /** The selection by store, for the map; the worst of its freezers marks a store. */
 export function fleetMap(db: ProducerDb, selection: FleetSelection): MapStore[] {
   const where = conditions(db, selection);
-  const rank = sql`case when ${showing('warm', selection.now)} then 0 when ${showing('first', selection.now)} then 1
-    when ${showing('silent', selection.now)} then 2 else 3 end`;
+  const rank = sql`case when ${showing('warm', selection)} then 0 when ${showing('first', selection)} then 1
+    when ${showing('silent', selection)} then 2 else 3 end`;
   const rows = db.view<Omit<MapStore, 'mark'> & { rank: number }>(
     (producer) => sql`
     select s.id, s.name, s.city, s.latitude, s.longitude, picked.freezers, nullif(picked.likely, ${NEVER}) as likely, picked.rank
@@ -90,25 +92,28 @@ export function fleetMap(db: ProducerDb, selection: FleetSelection): MapStore[] 
 
 const marks: MapMark[] = ['warm', 'first', 'silent', 'fine'];
 
-function conditions(db: ProducerDb, { visible, q, district, account, store, show, now }: FleetSelection): SQL {
+function conditions(db: ProducerDb, selection: FleetSelection): SQL {
+  const { visible, q, district, account, store, show } = selection;
   const wanted = [
     visible,
     district && sql`fleet_row.district_id = ${district}`,
     account && sql`fleet_row.account_id = ${account}`,
     store && sql`fleet_row.store_id = ${store}`,
-    show && showing(show, now),
+    show && showing(show, selection),
     q && found(db, q),
   ].filter((one): one is SQL => Boolean(one));
   return sql.join(wanted, sql` and `);
 }
 
 /** The rules of `domain/fleet-standing.ts`, asked of rows; each is 1 or 0. */
-function showing(show: FleetShow, now: number): SQL {
+function showing(show: FleetShow, { trucks, now }: FleetSelection): SQL {
   const usable = sql`fleet_row.heard_at >= ${now - UNUSABLE_AFTER_MS}`;
   if (show === 'unfitted') return sql`(fleet_row.fitted = 0)`;
   if (show === 'silent') return sql`(fleet_row.fitted = 1 and coalesce(fleet_row.heard_at, 0) < ${now - SILENT_AFTER_MS})`;
   if (show === 'warm') return sql`(fleet_row.warm_since is not null and ${usable})`;
-  return sql`coalesce(${usable} and case when fleet_row.truck_to >= ${now} then fleet_row.risk_at < fleet_row.truck_from else fleet_row.likely < ${now + SOON_MS} end, 0)`;
+  const soon = sql`fleet_row.likely < ${now + SOON_MS}`;
+  const near = trucks ? sql`case when fleet_row.truck_to >= ${now} then fleet_row.risk_at < fleet_row.truck_from else ${soon} end` : soon;
+  return sql`coalesce(${usable} and ${near}, 0)`;
 }
 
 /** A search that finds more than this is answered by looking through the rows in the order they are shown. */

@@ -28,7 +28,6 @@ export function changeDistrict({ act, now }: ProducerContext, id: string, body: 
     if (name !== undefined) refuseTaken('/name', holderOf(tx.db, name), id);
     tx.db.update(districts, id, { name, retiredAt: retiredAtOf(retired, now), version: district.version + 1 });
     tx.audit('District', id, changed);
-    if (name !== undefined) tx.listAnew({ districtId: id });
   });
 }
 

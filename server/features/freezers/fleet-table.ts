@@ -10,26 +10,30 @@ const BATCH = 500;
 /** The selection as a table, batch by batch in the list's order: the store and the freezer, then the columns asked for. */
 export function* fleetTable({ db, language, now }: ProducerContext, selection: FleetSelection, wanted: string | undefined): Generator<string[][]> {
   const t = fileWords(language);
-  const columns = fleetColumns.filter((column) => wanted === undefined || wanted.split(',').includes(column));
+  const columns = fleetColumns.filter((column) => (wanted === undefined || wanted.split(',').includes(column)) && (column !== 'truck' || selection.trucks));
   yield [[...FIRST, ...columns.flatMap((column) => cells[column].heads)].map((head) => t(`freezers.${head}`))];
   const say = (kind: string) => t(`freezers.standing.${kind}`);
   for (let after: FleetPlace | null = null; ; ) {
     const found: Placed[] = fleetView(db, selection, after, BATCH).map(placed);
     const last = found.at(-1);
     if (!last) return;
-    yield found.map(({ row }) => [row.store, row.city, row.name, row.timeZone, ...columns.flatMap((column) => cells[column].of(row, now, say))]);
+    const rows = found.map(({ row }): Told => (selection.trucks ? row : { ...row, truck: undefined }));
+    yield rows.map((row) => [row.store, row.city, row.name, row.timeZone, ...columns.flatMap((column) => cells[column].of(row, now, say))]);
     after = last.place;
   }
 }
 
 const FIRST = ['store', 'city', 'freezer', 'timeZone'];
 
+/** A row as its reader is told it; `truck` is undefined for whoever may not read of trucks. */
+type Told = Omit<FleetRow, 'truck'> & { truck: FleetRow['truck'] | undefined };
+
 interface Cells {
   heads: string[];
-  of: (row: FleetRow, now: number, say: (kind: string) => string) => string[];
+  of: (row: Told, now: number, say: (kind: string) => string) => string[];
 }
 
-const time = (at: number | null | undefined, { timeZone }: FleetRow): string => (at === null || at === undefined ? '' : localMinute(at, timeZone));
+const time = (at: number | null | undefined, { timeZone }: Told): string => (at === null || at === undefined ? '' : localMinute(at, timeZone));
 const number = (value: number | null, digits = 0): string => (value === null ? '' : value.toFixed(digits));
 
 const cells: Record<FleetColumn, Cells> = {

@@ -14,7 +14,8 @@ export function tieSensor(ctx: ProducerContext, freezerId: string, { sensorId, p
     tx.authorise('create', 'Install', { freezerId, storeId: freezer.storeId });
     if (!tx.db.find(sensors, sensorId)) throw problem('unknown-sensor');
     const elsewhere = currentInstalls(tx.db, { sensorId }).filter((install) => install.freezerId !== freezerId);
-    if (elsewhere.length > 0 && !move) throw problem('sensor-elsewhere');
+    // Out of a freezer they may not see nobody takes anything.
+    if (elsewhere.some((install) => !move || !isReadable(ctx, tx.db, install.freezerId))) throw problem('sensor-elsewhere');
     refuseImpossible(tx.db, freezer, { probesIn, kept: freezer.lanes });
 
     const here = currentInstalls(tx.db, { freezerId });
@@ -58,7 +59,10 @@ export function endInstalls({ db }: ActionTx, ended: Install[], now: number): vo
 }
 
 /** A freezer in use that this viewer may see; otherwise it does not exist. */
-function readableFreezer({ ability }: ProducerContext, db: ProducerDb, freezerId: string) {
+const readableFreezer = (ctx: ProducerContext, db: ProducerDb, freezerId: string) =>
+  orNotFound(isReadable(ctx, db, freezerId) ? freezerSettings(db, freezerId) : null);
+
+function isReadable({ ability }: ProducerContext, db: ProducerDb, freezerId: string): boolean {
   const readable = allowed(ability, 'read', 'Freezer', { id: freezers.id, storeId: freezers.storeId });
-  return orNotFound(db.find(freezers, freezerId, and(isNull(freezers.retiredAt), readable)) && freezerSettings(db, freezerId));
+  return db.find(freezers, freezerId, and(isNull(freezers.retiredAt), readable)) !== undefined;
 }

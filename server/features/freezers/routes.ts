@@ -1,6 +1,6 @@
 import { api } from '../../contract';
 import type { Query } from '../../contract/endpoint';
-import type { mapFreezers } from '../../contract/fleet';
+import type { FleetRow, mapFreezers } from '../../contract/fleet';
 import { allowed, fleetRows } from '../../db';
 import { fleetDigest, fleetMap, fleetView, placed, type FleetSelection } from '../../db/views/fleet';
 import { dayOf } from '../../domain/civil';
@@ -16,8 +16,10 @@ export const freezersRoutes = [
     const limit = query.limit ?? 50;
     const cursor = readCursor(query.after, ['number', 'string']);
     const after = cursor ? ([Number(cursor[0]), String(cursor[1])] as const) : null;
-    const page = pageOf(fleetView(ctx.db, selectionOf(ctx, query), after, limit + 1), limit, (json) => [...placed(json).place]);
-    return madeJson(`{"freezers":[${page.rows.join(',')}],"next":${JSON.stringify(page.next)}}`);
+    const selection = selectionOf(ctx, query);
+    const page = pageOf(fleetView(ctx.db, selection, after, limit + 1), limit, (json) => [...placed(json).place]);
+    const rows = selection.trucks ? page.rows : page.rows.map(untold);
+    return madeJson(`{"freezers":[${rows.join(',')}],"next":${JSON.stringify(page.next)}}`);
   }),
 
   route(api.freezers.digest, (ctx, { query }) => fleetDigest(ctx.db, selectionOf(ctx, query))),
@@ -31,6 +33,9 @@ export const freezersRoutes = [
   route(api.freezers.map, (ctx, { query }) => ({ stores: fleetMap(ctx.db, selectionOf(ctx, query)) })),
 ];
 
+/** For whoever may not read of trucks: no truck, nor what was reckoned against one. */
+const untold = (json: string): string => JSON.stringify({ ...placed(json).row, truck: null, riskAt: null } satisfies FleetRow);
+
 /** What of the fleet this viewer asks for, within what they may see. */
 export function selectionOf({ ability, now }: ProducerContext, { q, district, account, store, show }: Query<typeof mapFreezers>): FleetSelection {
   return {
@@ -41,6 +46,7 @@ export function selectionOf({ ability, now }: ProducerContext, { q, district, ac
     account,
     store,
     show,
+    trucks: ability.can('read', 'NextTruck'),
     now,
   };
 }

@@ -3,16 +3,18 @@ import type { Body } from '../../contract/endpoint';
 import type { changeSettings as changeEndpoint, Settings } from '../../contract/settings';
 import type { ProducerContext } from '../../http/context';
 import { problem } from '../../http/problem';
+import { changedOf } from '../changed';
 import { redraw } from '../pictures';
 
-/** Changes what is given; a new risk limit is asked of every freezer at once. */
-export function changeSettings({ act, producer }: ProducerContext, { version, mailSender, ...change }: Body<typeof changeEndpoint>): void {
+/** Changes what differs; a new risk limit is asked of every freezer at once. */
+export function changeSettings({ act, producer }: ProducerContext, body: Body<typeof changeEndpoint>): void {
   act('change-settings', (tx) => {
     tx.authorise('update', 'Settings', {});
-    if (version !== producer.version) throw problem('changed-meanwhile');
+    const { mailSender, ...change } = changedOf(presentSettings({ producer }), body);
     const sender = mailSender && { senderName: mailSender.name, replyTo: mailSender.replyTo };
     tx.changeProducer({ ...change, ...sender });
-    tx.audit('Settings', 'settings', { ...change, ...sender });
+    // An address is somebody's; the trail names nobody.
+    tx.audit('Settings', 'settings', { ...change, ...(sender && { senderName: sender.senderName, replyTo: true }) });
   });
 }
 
@@ -40,7 +42,7 @@ function keepLogo({ act }: ProducerContext, logo: string | null): void {
   });
 }
 
-export const presentSettings = ({ producer }: ProducerContext): Settings => {
+export const presentSettings = ({ producer }: Pick<ProducerContext, 'producer'>): Settings => {
   const { name, timeZone, urgentPhone, serviceHours, holidays, riskLimit, senderName, replyTo, logo, version } = producer;
   return { name, timeZone, urgentPhone, serviceHours, holidays, riskLimit, mailSender: { name: senderName, replyTo }, hasLogo: logo !== null, version };
 };

@@ -26,7 +26,8 @@ export function toldWindow(wanted: { day: string; from: string; to: string }, { 
 export function writeTruck(tx: ActionTx, { now, newId }: Pick<ProducerContext, 'now' | 'newId'>, storeId: string, told: Told, seen: number | null): string {
   const known = truckOf(tx.db, storeId);
   if ((known?.version ?? null) !== seen) throw problem('truck-changed');
-  const row = { ...told, version: (seen ?? 0) + 1, updatedAt: now };
+  // A truck told anew never has a version somebody saw of the one before.
+  const row = { ...told, version: seen === null ? now : seen + 1, updatedAt: now };
   const id = known?.id ?? newId();
   tx.db.upsert(nextTrucks, { id, storeId, ...row }, row);
   tx.listAnew({ storeId });

@@ -1,14 +1,15 @@
 import { Plus, X } from 'lucide-react';
-import { useFieldArray, useFormContext, useWatch } from 'react-hook-form';
+import { useFieldArray, useWatch } from 'react-hook-form';
 import { useTranslation } from 'react-i18next';
 import type { BodyInput } from '../../../server/contract/endpoint';
 import type { Freezer } from '../../../server/contract/freezers';
 import type { api } from '../../../server/contract/index';
 import { SelectField } from '../../form/select-field';
 import { TextField } from '../../form/text-field';
-import { useFaultWords } from '../../form/use-fault-words';
+import { useListFault } from '../../form/use-list-fault';
 import { useFormat } from '../../lib/format';
 import { Button, IconButton } from '../../ui/button';
+import { FieldError } from '../../ui/field';
 import { BagsField } from './bags-field';
 import type { Products } from './record-delivery';
 
@@ -22,15 +23,12 @@ interface Props {
 /** What was left, line by line: which bags, into which freezer, how many, and what was taken back. */
 export function LineFields({ products, freezers }: Props) {
   const { t } = useTranslation('deliveries');
-  const say = useFaultWords();
-  const { formState, getFieldState } = useFormContext<Values>();
   const { fields, append, remove } = useFieldArray<Values, 'lines'>({ name: 'lines' });
-  const { error } = getFieldState('lines', formState);
-  const message = error?.message ?? error?.root?.message;
+  const { fault, faultId } = useListFault('lines');
   return (
-    <fieldset>
+    <fieldset aria-describedby={faultId}>
       <legend className="font-semibold">{t('record.lines')}</legend>
-      {message && <p className="font-semibold text-rust">{say(message)}</p>}
+      {faultId && <FieldError id={faultId}>{fault}</FieldError>}
       <div className="mt-2 grid gap-3">
         {fields.map(({ id }, i) => (
           <Line key={id} i={i} products={products} freezers={freezers} onRemove={() => remove(i)} />

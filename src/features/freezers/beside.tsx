@@ -6,7 +6,6 @@ import { Link } from 'react-router-dom';
 import type { FleetRow } from '../../../server/contract/fleet';
 import type { FreezerPage } from '../../../server/contract/freezers';
 import { api } from '../../../server/contract/index';
-import { fleetStanding } from '../../../server/domain/fleet-standing';
 import { Problem } from '../../api/call';
 import { q } from '../../api/query';
 import { ProblemNote } from '../../form/problem-note';
@@ -17,6 +16,7 @@ import { Skeleton } from '../../ui/skeleton';
 import { BesideFacts } from './beside-facts';
 import { BesideLevel } from './beside-level';
 import { StandingTag } from './standing-tag';
+import { useStanding } from './use-standing';
 
 interface Props {
   freezerId: string;
@@ -31,6 +31,7 @@ interface Props {
 export function Beside({ freezerId, row, now, everyMs, close }: Props) {
   const { t } = useTranslation('freezers');
   const { slug } = useMembership().producer;
+  const standingOf = useStanding();
   const { data, error } = useQuery(q(api.freezers.read, { params: { producer: slug, freezerId } }, { everyMs }));
   const title = data ? data.store.name : row?.store;
   return (
@@ -44,7 +45,7 @@ export function Beside({ freezerId, row, now, everyMs, close }: Props) {
       </div>
       {row && (
         <div className="mt-1.5 empty:hidden">
-          <StandingTag standing={fleetStanding(row, now)} now={now} />
+          <StandingTag standing={standingOf(row, now)} now={now} />
         </div>
       )}
       {data ? <Found found={data} now={now} /> : error instanceof Problem ? <ProblemNote problem={error} /> : <Waiting />}

@@ -1,6 +1,5 @@
 import { Columns3 } from 'lucide-react';
 import { useTranslation } from 'react-i18next';
-import { fleetColumns } from '../../../server/contract/fleet';
 import { Menu } from '../../ui/menu';
 import type { Columns } from './use-columns';
 
@@ -18,7 +17,7 @@ export function ColumnsMenu({ columns }: { columns: Columns }) {
       <Menu trigger={trigger}>
         <fieldset>
           <legend className="sr-only">{t('columns.choose')}</legend>
-          {fleetColumns.map((column) => (
+          {columns.all.map((column) => (
             <label key={column} className="flex min-h-10 items-center gap-3 rounded-control px-3 hover:bg-sunk">
               <input type="checkbox" className="size-4.5 accent-fjord" checked={columns.shown.includes(column)} onChange={() => columns.toggle(column)} />
               {t(`columns.${column}`)}

@@ -5,16 +5,25 @@ import { useFormat } from '../../lib/format';
 
 const wrongs = ['first', 'warm', 'silent'] as const;
 
+interface Props {
+  digest: FleetDigest;
+  /** Whether the reader is told of trucks. */
+  trucks: boolean;
+}
+
 /** How the freezers stand, in a sentence; each thing that is wrong is a link to the freezers meant. */
-export function Digest({ digest }: { digest: FleetDigest }) {
+export function Digest({ digest, trucks }: Props) {
   const { t } = useTranslation('freezers');
   const format = useFormat();
   const wrong = wrongs.filter((show) => digest[show] > 0);
   const seen = digest.all - digest.unfitted;
   if (digest.all === 0) return null;
-  if (wrong.length === 0) return <p className={look}>{seen === 0 ? t('digest.unseen', { count: digest.all }) : t('digest.fine', { count: seen })}</p>;
+  if (wrong.length === 0) return <p className={look}>{seen === 0 ? t('digest.unseen', { count: digest.all }) : t(trucks ? 'digest.fine' : 'digest.fine-untold', { count: seen })}</p>;
   const alone = digest.all === 1;
-  const said = (show: FleetShow) => (alone ? t(`digest.alone.${show}`) : t(`digest.${show}`, { count: digest[show] }));
+  const said = (show: FleetShow) => {
+    const key = show === 'first' && !trucks ? 'soon' : show;
+    return alone ? t(`digest.alone.${key}`) : t(`digest.${key}`, { count: digest[show] });
+  };
   const sentence = t(alone ? 'digest.alone.of' : 'digest.of', { all: format.number(digest.all), list: format.list(wrong.map((show) => `<${show}>`)) });
   return (
     <p className={look}>

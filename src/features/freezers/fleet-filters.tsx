@@ -41,6 +41,7 @@ export function FleetFilters({ searchRef }: Props) {
 
 function ShowButtons({ filters }: { filters: Filters }) {
   const { t } = useTranslation('freezers');
+  const isTold = useAbility().can('read', 'NextTruck');
   return (
     <div role="group" aria-label={t('show.label')} className="flex flex-wrap gap-2">
       {fleetShows.map((show) => {
@@ -54,7 +55,7 @@ function ShowButtons({ filters }: { filters: Filters }) {
             className="inline-flex min-h-12 items-center gap-1.5 rounded-control border border-edge bg-surface px-3 text-body whitespace-nowrap text-ink-2 hover:bg-sunk aria-pressed:border-fjord aria-pressed:bg-fjord-tint aria-pressed:font-semibold aria-pressed:text-fjord sm:min-h-11"
           >
             {pressed && <Check aria-hidden size={16} />}
-            {t(`show.${show}`)}
+            {t(show === 'first' && !isTold ? 'show.soon' : `show.${show}`)}
           </button>
         );
       })}

@@ -1,8 +1,9 @@
-import { useTranslation } from 'react-i18next';
 import { useSearchParams } from 'react-router-dom';
 import type { FleetColumn } from '../../../server/contract/fleet';
 import type { Result } from '../../../server/contract/endpoint';
 import type { api } from '../../../server/contract/index';
+import { useMembership } from '../../lib/me';
+import { MovedNote } from '../../table/moved-note';
 import { Pager } from '../../table/pager';
 import { useSteadyRows } from '../../table/use-steady-rows';
 import { FleetTable } from './fleet-table';
@@ -19,23 +20,13 @@ interface Props {
 
 /** The rows as the reader found them, and a word when they would stand otherwise. */
 export function FleetList({ list, columns, open, now }: Props) {
-  const { t } = useTranslation('freezers');
+  const { slug } = useMembership().producer;
   const [search] = useSearchParams();
-  const steady = useSteadyRows(list.freezers, JSON.stringify(listQuery(search)));
+  const steady = useSteadyRows(list.freezers, JSON.stringify([slug, listQuery(search)]));
   return (
     <div className="min-h-0 lg:flex lg:h-full lg:flex-col">
       {steady.rows.length === 0 ? <NoFreezers /> : <FleetTable rows={steady.rows} columns={columns} open={open} now={now} />}
-      {/* Below the rows, which it must not push away; on a phone it stays in sight. */}
-      <p role="status" className="mt-2 text-ink-2 empty:hidden max-lg:sticky max-lg:bottom-20 max-lg:z-10 max-lg:rounded-control max-lg:border max-lg:border-edge max-lg:bg-surface max-lg:px-4">
-        {steady.moved && (
-          <>
-            {t('moved.words')}{' '}
-            <button type="button" onClick={steady.showNewest} className="min-h-12 font-semibold text-fjord underline underline-offset-4 lg:min-h-8">
-              {t('moved.show')}
-            </button>
-          </>
-        )}
-      </p>
+      <MovedNote moved={steady.moved} showNewest={steady.showNewest} />
       <Pager next={list.next} />
     </div>
   );

@@ -1,10 +1,10 @@
 import { useTranslation } from 'react-i18next';
 import { Link } from 'react-router-dom';
 import type { FleetColumn, FleetRow as Row } from '../../../server/contract/fleet';
-import { fleetStanding } from '../../../server/domain/fleet-standing';
 import { FleetCell } from './fleet-cells';
 import { narrowClass } from './narrow-class';
 import type { Open } from './use-open';
+import { useStanding } from './use-standing';
 
 interface Props {
   row: Row;
@@ -16,7 +16,7 @@ interface Props {
 /** One freezer: 52 px on a desk, a card with what matters most on a phone. */
 export function FleetRow({ row, columns, open, now }: Props) {
   const { t } = useTranslation('freezers');
-  const standing = fleetStanding(row, now);
+  const standing = useStanding()(row, now);
   const picked = row.id === open.shown;
   const narrow = open.shown !== null;
   return (

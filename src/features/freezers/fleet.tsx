@@ -10,7 +10,7 @@ import { urlOf } from '../../api/call';
 import { page, type Place } from '../../api/page';
 import { q } from '../../api/query';
 import { PageTitle } from '../../layouts/page-title';
-import { useMembership } from '../../lib/me';
+import { useAbility, useMembership } from '../../lib/me';
 import { paths } from '../../paths';
 import { ConnectionNote } from '../stores/connection-note';
 import { useNow } from '../stores/use-now';
@@ -49,6 +49,7 @@ interface Props {
 function Fleet({ list, digest, place }: Props) {
   const { t } = useTranslation('freezers');
   const { side, producer } = useMembership();
+  const isTold = useAbility().can('read', 'NextTruck');
   const searchRef = useRef<HTMLInputElement>(null);
   const now = useNow();
   const asked = useQuery(listAsked(place));
@@ -68,7 +69,7 @@ function Fleet({ list, digest, place }: Props) {
         {!map && <ColumnsMenu columns={columns} />}
         <CsvLink columns={columns} search={place.search} />
       </div>
-      <Digest digest={digest} />
+      <Digest digest={digest} trucks={isTold} />
       <FleetFilters searchRef={searchRef} />
       <div className={`lg:min-h-0 lg:flex-1 ${open.shown ? 'xl:grid xl:grid-cols-[minmax(0,1fr)_21rem] xl:gap-4' : ''}`}>
         {map ? (

@@ -8,7 +8,7 @@ import { Clocks } from './clocks';
 import type { CellProps } from './fleet-cells';
 import { Unknown } from './unknown';
 
-const troubles = ['empty', 'first', 'soon'];
+const troubles = ['empty', 'first', 'soon', 'soon-untold'];
 
 /** When it likely runs out: in words, and on the seven days ahead. */
 export function LikelyCell({ row, standing, now, narrow }: CellProps) {
@@ -20,11 +20,11 @@ export function LikelyCell({ row, standing, now, narrow }: CellProps) {
   return (
     <span className="flex items-center gap-4">
       {!narrow && (
-        <span className="hidden xl:block">
+        <span className="hidden shrink-0 xl:block">
           <SpanMini now={now} early={early} likely={likely} late={late} truck={comingTruck(row.truck, now)} trouble={troubles.includes(standing.kind)} label={between} />
         </span>
       )}
-      <span className="min-w-28">{likely === null ? <NotSeen /> : <Clocks zone={timeZone} now={now} say={(words) => likelyWords({ ...row, likely }, words, now, t)} />}</span>
+      <span className="min-w-28 shrink-0">{likely === null ? <NotSeen /> : <Clocks zone={timeZone} now={now} say={(words) => likelyWords({ ...row, likely }, words, now, t)} />}</span>
     </span>
   );
 }

@@ -29,6 +29,7 @@ function useStandingWords(standing: FleetStanding, now: number): string {
       return standing.product === null ? t('standing.empty') : t('standing.empty-product', { product: standing.product });
     case 'tight':
     case 'soon':
+    case 'soon-untold':
     case 'unfitted':
     case 'waiting':
     case 'fine':
@@ -45,6 +46,7 @@ const looks: Record<Exclude<FleetStanding['kind'], 'fine'>, { tone: TagTone; sha
   empty: { tone: 'rust', shape: 'triangle' },
   first: { tone: 'ember', shape: 'triangle' },
   soon: { tone: 'ember', shape: 'triangle' },
+  'soon-untold': { tone: 'ember', shape: 'triangle' },
   tight: { tone: 'ember' },
   silent: { tone: 'straw', shape: 'ring' },
   unfitted: { tone: 'quiet' },

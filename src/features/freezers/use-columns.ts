@@ -1,8 +1,10 @@
 import { useState } from 'react';
 import { fleetColumns, type FleetColumn } from '../../../server/contract/fleet';
-import { useMembership } from '../../lib/me';
+import { useAbility, useMembership } from '../../lib/me';
 
 export interface Columns {
+  /** Those this viewer may look at. */
+  all: FleetColumn[];
   /** In the order of the table. */
   shown: FleetColumn[];
   toggle: (column: FleetColumn) => void;
@@ -11,13 +13,15 @@ export interface Columns {
 /** The columns a person chose at this producer, kept in the browser. */
 export function useColumns(): Columns {
   const place = `nilas.columns.${useMembership().membershipId}`;
-  const [shown, show] = useState(() => keptColumns(localStorage.getItem(place)));
+  const isTold = useAbility().can('read', 'NextTruck');
+  const all = fleetColumns.filter((column) => column !== 'truck' || isTold);
+  const [kept, keep] = useState(() => keptColumns(localStorage.getItem(place)));
   const toggle = (column: FleetColumn) => {
-    const next = fleetColumns.filter((one) => shown.includes(one) !== (one === column));
+    const next = fleetColumns.filter((one) => kept.includes(one) !== (one === column));
     localStorage.setItem(place, next.join(','));
-    show(next);
+    keep(next);
   };
-  return { shown, toggle };
+  return { all, shown: all.filter((column) => kept.includes(column)), toggle };
 }
 
 /** What was kept, without what no version of the table knows; before a first choice the usual ones. */

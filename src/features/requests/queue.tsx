@@ -3,13 +3,16 @@ import { useTranslation } from 'react-i18next';
 import { Outlet, useNavigate, useParams, useSearchParams } from 'react-router-dom';
 import { api } from '../../../server/contract/index';
 import type { RequestSummary } from '../../../server/contract/requests';
-import { page } from '../../api/page';
+import { page, type Place } from '../../api/page';
 import { q } from '../../api/query';
 import { PageTitle } from '../../layouts/page-title';
 import { useMembership } from '../../lib/me';
 import { paths } from '../../paths';
+import { MovedNote } from '../../table/moved-note';
 import { Pager } from '../../table/pager';
 import { queryFrom } from '../../table/query-from';
+import { useOwnActs } from '../../table/use-own-acts';
+import { useSteadyRows } from '../../table/use-steady-rows';
 import { EmptyState } from '../../ui/states';
 import { DeskHours } from './desk-hours';
 import { QueueFilters } from './queue-filters';
@@ -21,32 +24,35 @@ const EVERY = 30_000;
 export const queue = page({
   words: ['requests'],
   queries: (place) => ({
-    list: q(api.requests.list, { params: { producer: place.params.producer ?? '' }, query: queryFrom(api.requests.list, filterNames, place.search) }, { everyMs: EVERY }),
+    list: q(api.requests.list, { params: { producer: place.params.producer ?? '' }, query: queryOf(place) }, { everyMs: EVERY }),
   }),
   View: Queue,
 });
 
 interface Props {
   list: { requests: RequestSummary[]; next: string | null };
+  place: Place;
 }
 
 /** The requests at the left, the one picked beside them; on a phone one of the two. */
-function Queue({ list }: Props) {
+function Queue(shown: Props) {
   const { requestId } = useParams();
   const { side } = useMembership();
   // A store's people see one thing at a time: their few requests, or one of them whole.
-  if (side === 'store') return requestId ? <Outlet /> : <ListPane list={list} open={undefined} />;
+  if (side === 'store') return requestId ? <Outlet /> : <ListPane {...shown} open={undefined} />;
   return (
     <div className="lg:grid lg:grid-cols-[minmax(300px,340px)_minmax(0,1fr)]">
-      <ListPane list={list} open={requestId} />
+      <ListPane {...shown} open={requestId} />
       <div className={requestId ? '' : 'hidden lg:block'}>{requestId ? <Outlet /> : <Pick />}</div>
     </div>
   );
 }
 
-function ListPane({ list, open }: Props & { open: string | undefined }) {
+function ListPane({ list, place, open }: Props & { open: string | undefined }) {
   const { t } = useTranslation('requests');
-  const { side } = useMembership();
+  const { side, producer } = useMembership();
+  const acted = useOwnActs();
+  const steady = useSteadyRows(list.requests, JSON.stringify([producer.slug, queryOf(place), acted]));
   const searchRef = useRef<HTMLInputElement>(null);
   const title = side === 'store' ? t('title-store') : t('title');
   const Heading = open ? 'h2' : 'h1';
@@ -60,7 +66,8 @@ function ListPane({ list, open }: Props & { open: string | undefined }) {
         </div>
       )}
       <QueueFilters searchRef={searchRef} />
-      <Rows requests={list.requests} open={open} />
+      <Rows requests={steady.rows} open={open} />
+      <MovedNote moved={steady.moved} showNewest={steady.showNewest} className="px-4" />
       <div className="px-4">
         <Pager next={list.next} />
       </div>
@@ -109,5 +116,7 @@ function Pick() {
     </div>
   );
 }
+
+const queryOf = ({ search }: Place) => queryFrom(api.requests.list, filterNames, search);
 
 const filterNames = ['state', 'kind', 'assignee', 'store', 'q', 'after'] as const;

@@ -1,10 +1,10 @@
 import { useRef } from 'react';
 import { Plus, X } from 'lucide-react';
-import { useFieldArray, useFormContext } from 'react-hook-form';
+import { useFieldArray } from 'react-hook-form';
 import { useTranslation } from 'react-i18next';
 import type { Settings } from '../../../server/contract/settings';
 import { TextField } from '../../form/text-field';
-import { useFaultWords } from '../../form/use-fault-words';
+import { useListFault } from '../../form/use-list-fault';
 import { Button, IconButton } from '../../ui/button';
 import { FieldError } from '../../ui/field';
 
@@ -15,24 +15,21 @@ const most = 60;
 /** Any number of days, each with its name. */
 export function HolidaysField() {
   const { t } = useTranslation('settings');
-  const say = useFaultWords();
   const adder = useRef<HTMLButtonElement>(null);
-  const { formState, getFieldState } = useFormContext<Values>();
   const { fields, append, remove } = useFieldArray<Values, 'holidays'>({ name: 'holidays' });
-  const { error } = getFieldState('holidays', formState);
-  const message = error?.message ?? error?.root?.message;
+  const { fault, faultId } = useListFault('holidays');
   const take = (i: number) => {
     remove(i);
     // The pressed button is gone with its day.
     adder.current?.focus();
   };
   return (
-    <fieldset className="min-w-0" aria-describedby="holidays-hint">
+    <fieldset className="min-w-0" aria-describedby={faultId ? `${faultId} holidays-hint` : 'holidays-hint'}>
       <legend className="sr-only">{t('holidays.title')}</legend>
       <p id="holidays-hint" className="text-body text-ink-3">
         {t('holidays.hint')}
       </p>
-      {message && <FieldError id="holidays-error">{say(message)}</FieldError>}
+      {faultId && <FieldError id={faultId}>{fault}</FieldError>}
       {fields.length === 0 && <p className="mt-2 text-ink-2">{t('holidays.none')}</p>}
       <ul className="mt-2 grid gap-3 empty:hidden">
         {fields.map(({ id }, i) => (

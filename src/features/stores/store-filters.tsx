@@ -1,4 +1,5 @@
 import { useTranslation } from 'react-i18next';
+import { useAbility } from '../../lib/me';
 import { FilterSearch } from '../../table/filter-search';
 import { FilterSelect } from '../../table/filter-select';
 import { useFilters } from '../../table/use-filters';
@@ -15,6 +16,7 @@ interface Props {
 export function StoreFilters({ places, retired = false }: Props) {
   const { t } = useTranslation('stores-list');
   const filters = useFilters();
+  const isTold = useAbility().can('read', 'NextTruck');
   const trucks = ['', 'today', 'late', 'none'].map((value) => ({ value, label: t(`truck.${value || 'any'}`) }));
   const named = (any: string, list: { id: string; name: string }[] = []) => [{ value: '', label: any }, ...list.map(({ id, name }) => ({ value: id, label: name }))];
   const uses = [
@@ -22,7 +24,7 @@ export function StoreFilters({ places, retired = false }: Props) {
     { value: 'only', label: t('retired.only') },
   ];
   const selects = [
-    { name: 'truck', label: t('truck.label'), options: trucks },
+    ...(isTold ? [{ name: 'truck', label: t('truck.label'), options: trucks }] : []),
     { name: 'district', label: t('district.label'), options: named(t('district.any'), places?.districts) },
     { name: 'account', label: t('account.label'), options: named(t('account.any'), places?.accounts) },
     ...(retired ? [{ name: 'retired', label: t('retired.label'), options: uses }] : []),

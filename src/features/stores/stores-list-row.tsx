@@ -2,7 +2,7 @@ import { useTranslation } from 'react-i18next';
 import { Link } from 'react-router-dom';
 import type { StoreSummary } from '../../../server/contract/stores';
 import { freshnessOf } from '../../../server/domain/freshness';
-import { useMembership } from '../../lib/me';
+import { useAbility, useMembership } from '../../lib/me';
 import { useFormat } from '../../lib/format';
 import { AttentionTag } from './attention-tag';
 import { truckWords } from './truck-words';
@@ -20,6 +20,7 @@ export function StoresListRow({ store, to, now }: Props) {
   const { t } = useTranslation('stores-list');
   const { producer, side } = useMembership();
   const format = useStoreWords(side === 'store' ? store.timeZone : producer.timeZone, now);
+  const isTold = useAbility().can('read', 'NextTruck');
   const { nextTruck, openRequests, runOutLikely } = store;
   return (
     <tr role="row" className="relative grid grid-cols-2 gap-x-4 gap-y-2 rounded-card border border-rule bg-surface p-4 hover:bg-ice-3 lg:table-row lg:rounded-none lg:border-0 lg:p-0">
@@ -38,10 +39,12 @@ export function StoresListRow({ store, to, now }: Props) {
         <Narrow label={t('columns.run-out')} />
         <span className="block first-letter:uppercase">{runOutLikely === null ? t('no-run-out') : format.partOfDay(runOutLikely)}</span>
       </td>
-      <td role="cell" className={cell}>
-        <Narrow label={t('columns.truck')} />
-        {nextTruck ? truckWords(nextTruck, format, now) : t('no-truck')}
-      </td>
+      {isTold && (
+        <td role="cell" className={cell}>
+          <Narrow label={t('columns.truck')} />
+          {nextTruck ? truckWords(nextTruck, format, now) : t('no-truck')}
+        </td>
+      )}
       <td role="cell" className={cell}>
         <Narrow label={t('columns.requests')} />
         {openRequests > 0 ? t('requests', { count: openRequests }) : t('no-requests')}

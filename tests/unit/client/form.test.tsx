@@ -71,3 +71,15 @@ test('so is what the server finds wrong, and what is at no field comes last', as
   send();
   expect(await listed()).toEqual(['Terms', 'Name', 'invalid']);
 });
+
+test('a refusal that is at no field is brought to whoever pressed the button, each time', async () => {
+  const refusal = { type: 'urn:nilas:problem:not-allowed', title: '', detail: '', status: 403, errors: [] };
+  vi.stubGlobal('fetch', () => Promise.resolve(Response.json(refusal, { status: 403 })));
+  open();
+  for (let tries = 0; tries < 2; tries += 1) {
+    screen.getByText('Save').focus();
+    send();
+    await vi.waitFor(() => expect(document.activeElement?.contains(screen.getByRole('alert'))).toBe(true));
+    expect(document.activeElement?.contains(screen.getByText('Save'))).toBe(false);
+  }
+});

@@ -16,11 +16,11 @@ afterEach(cleanup);
 
 const fleet = (counts: Partial<FleetDigest>): FleetDigest => ({ all: 84, first: 0, warm: 0, silent: 0, unfitted: 4, ...counts });
 
-async function said(language: 'en' | 'es', digest: FleetDigest, url = '/kestrel-bend/freezers') {
+async function said(language: 'en' | 'es', digest: FleetDigest, { url = '/kestrel-bend/freezers', trucks = true } = {}) {
   await i18next.changeLanguage(language);
   const { container } = render(
     <MemoryRouter initialEntries={[url]}>
-      <Digest digest={digest} />
+      <Digest digest={digest} trucks={trucks} />
     </MemoryRouter>,
   );
   const links = [...container.querySelectorAll('a')].map((link) => [link.textContent, link.getAttribute('href')]);
@@ -43,7 +43,7 @@ describe('what is wrong', () => {
   });
 
   test('each part leads to the freezers meant, within what is already picked, on the first page', async () => {
-    const { links } = await said('en', wrong, '/kestrel-bend/freezers?district=d1&show=silent&after=x');
+    const { links } = await said('en', wrong, { url: '/kestrel-bend/freezers?district=d1&show=silent&after=x' });
     expect(links).toEqual([
       ['5 may run out before their next truck', '/kestrel-bend/freezers?district=d1&show=first'],
       ['1 is warm', '/kestrel-bend/freezers?district=d1&show=warm'],
@@ -64,6 +64,15 @@ describe('nothing wrong', () => {
     expect((await said('en', fleet({}))).words).toBe('All 80 freezers with a sensor are fine: cold, heard from and stocked until their next truck.');
     cleanup();
     expect((await said('es', fleet({ all: 2, unfitted: 1 }))).words).toBe('El único congelador con sensor está bien: frío, con señal y con hielo hasta su próximo camión.');
+  });
+
+  test('and nothing of trucks to whoever may not read of them', async () => {
+    const untold = { trucks: false };
+    expect((await said('en', fleet({ first: 2 }), untold)).words).toBe('Of 84 freezers, 2 may run out within two days.');
+    cleanup();
+    expect((await said('en', fleet({}), untold)).words).toBe('All 80 freezers with a sensor are fine: cold, heard from and stocked for two days.');
+    cleanup();
+    expect((await said('es', fleet({ all: 1, first: 1, unfitted: 0 }), untold)).words).toBe('El único congelador podría quedarse sin hielo en menos de dos días.');
   });
 
   test('says nothing good of freezers without a sensor', async () => {

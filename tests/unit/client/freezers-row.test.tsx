@@ -57,9 +57,9 @@ const membership: Membership = {
 };
 
 /** The row's cells by their place: the name, then the columns in their order. */
-function cells(change: Partial<Row>): Record<string, string> {
+function cells(change: Partial<Row>, role: Membership['role'] = 'dispatcher'): Record<string, string> {
   const client = new QueryClient({ defaultOptions: { queries: { staleTime: Infinity } } });
-  client.setQueryData(meQuery.queryKey, { person: { id: 'p1', name: 'Wes', email: 'wes@kestrelbend.example', language: 'en' }, memberships: [membership] });
+  client.setQueryData(meQuery.queryKey, { person: { id: 'p1', name: 'Wes', email: 'wes@kestrelbend.example', language: 'en' }, memberships: [{ ...membership, role }] });
   const open = { asked: null, shown: null, linkTo: (id: string) => `/kestrel-bend/freezers/${id}`, close: () => undefined };
   render(
     <QueryClientProvider client={client}>
@@ -117,4 +117,8 @@ test('a truck past its window is said to have been due', () => {
   const said = cells({ truck: { from: now - 3 * hour, to: now - hour }, likely: now + 20 * hour });
   expect(said.truck).toContain('Was due Tue 10:10–12:10');
   expect(said.state).toBe('runs out soon, no truck');
+});
+
+test('who may not read of trucks is not told that there is none', () => {
+  expect(cells({ truck: null, riskAt: null, likely: now + 20 * hour }, 'technician').state).toBe('runs out soon');
 });

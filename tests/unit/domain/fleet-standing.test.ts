@@ -69,6 +69,10 @@ describe('against the truck', () => {
     expect(of({ likely: now + hour, riskAt: now, truck: late })).toEqual({ kind: 'fine' });
     expect(of({ likely: now + hour, riskAt: now, truck: { ...late, to: now - 1 } })).toEqual({ kind: 'soon' });
   });
+  test('told of none, it is not said that there is none', () => {
+    expect(of({ truck: undefined, likely: now + 48 * hour - 1, riskAt: now })).toEqual({ kind: 'soon-untold' });
+    expect(of({ truck: undefined, likely: now + 48 * hour, riskAt: now })).toEqual({ kind: 'fine' });
+  });
   test('without one, only within two days', () => {
     expect(of({ truck: null, likely: now + 48 * hour - 1 })).toEqual({ kind: 'soon' });
     expect(of({ truck: null, likely: now + 48 * hour })).toEqual({ kind: 'fine' });

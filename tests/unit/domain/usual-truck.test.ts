@@ -16,6 +16,12 @@ describe('the usual truck', () => {
     expect(usualTruck(store(), at('2026-12-01', '11:00'))).toEqual({ ...today, day: '2026-12-03' });
   });
 
+  test('of a day with two spans is the first that has not ended', () => {
+    const receivingHours: Span[] = [{ days: [2], from: '14:00', to: '16:00' }, { days: [2], from: '06:00', to: '08:00' }];
+    expect(usualTruck(store({ receivingHours }), at('2026-12-01', '07:00'))?.from).toBe('06:00');
+    expect(usualTruck(store({ receivingHours }), at('2026-12-01', '10:00'))).toEqual({ day: '2026-12-01', from: '14:00', to: '16:00' });
+  });
+
   test('of a store with one day a week is next week’s once today’s has been', () => {
     expect(usualTruck(store({ deliveryDays: [2] }), at('2026-12-01', '12:00'))?.day).toBe('2026-12-08');
   });

@@ -40,8 +40,8 @@ test('no trouble is a dot, with or without a truck', () => {
 test('time runs from left to right: the truck a day after the run-out stands right of it', () => {
   const drawn = span(now + 2 * day, now + 3 * day);
   const truckX = Number(/^M([\d.]+)/.exec(drawn.querySelector('.fill-kelp')?.getAttribute('d') ?? '')?.[1]);
-  // A seventh of the 172 between the ends.
-  expect(truckX - Number(drawn.querySelector('circle')?.getAttribute('cx'))).toBeCloseTo(172 / 7, 5);
+  // A seventh of the 140 between the ends.
+  expect(truckX - Number(drawn.querySelector('circle')?.getAttribute('cx'))).toBeCloseTo(140 / 7, 5);
 });
 
 test('what lies beyond the seven days is not drawn', () => {

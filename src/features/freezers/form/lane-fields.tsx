@@ -4,8 +4,9 @@ import { useTranslation } from 'react-i18next';
 import type { BodyInput } from '../../../../server/contract/endpoint';
 import type { api } from '../../../../server/contract/index';
 import { SelectField } from '../../../form/select-field';
-import { useFaultWords } from '../../../form/use-fault-words';
+import { useListFault } from '../../../form/use-list-fault';
 import { Button, ButtonRow, IconButton } from '../../../ui/button';
+import { FieldError } from '../../../ui/field';
 import { evenShares } from './lane-shares';
 import { LanePreview } from './lane-preview';
 import { ShareField } from './share-field';
@@ -22,20 +23,19 @@ const most = 8;
 /** The lanes from left to right: what each holds, and its part of the width. */
 export function LaneFields({ products }: Props) {
   const { t } = useTranslation('freezer-form');
-  const say = useFaultWords();
-  const { formState, getFieldState, setValue } = useFormContext<Values>();
+  const { formState, setValue } = useFormContext<Values>();
   const { fields, append, remove, move } = useFieldArray<Values, 'lanes'>({ name: 'lanes' });
   const lanes = useWatch<Values, 'lanes'>({ name: 'lanes' });
-  const { error } = getFieldState('lanes', formState);
-  const message = error?.message ?? error?.root?.message;
+  const { fault, faultId } = useListFault('lanes');
   const evenOut = () => {
     for (const [i, share] of evenShares(fields.length).entries()) setValue(`lanes.${i}.widthShare`, share, { shouldDirty: true, shouldValidate: formState.isSubmitted });
   };
   return (
-    <div className="grid gap-3">
+    <fieldset className="grid min-w-0 gap-3" aria-describedby={faultId}>
+      <legend className="sr-only">{t('lanes.title')}</legend>
       <p className="text-ink-2">{t('lanes.lead')}</p>
       <LanePreview lanes={lanes} products={products} />
-      {message && <p className="font-semibold text-rust">{say(message)}</p>}
+      {faultId && <FieldError id={faultId}>{fault}</FieldError>}
       {fields.map(({ id }, i) => (
         <div key={id} role="group" aria-label={t('lanes.lane', { n: i + 1 })} className="rounded-card border border-rule bg-surface px-4 pt-1 pb-4">
           <div className="-mr-3 flex items-center">
@@ -63,6 +63,6 @@ export function LaneFields({ products }: Props) {
           {t('lanes.even')}
         </Button>
       </ButtonRow>
-    </div>
+    </fieldset>
   );
 }

@@ -71,7 +71,7 @@ const Row = memo(function Row({ store, said, lit, onLight }: RowProps) {
       </td>
       <td role="cell" className="col-start-2 row-start-1 self-center justify-self-end sm:px-2.5 sm:py-2">
         <Tag tone={tone} shape={shape}>
-          {t(`marks.${store.mark}`)}
+          {said.mark(store)}
         </Tag>
       </td>
       <td role="cell" className="col-start-2 row-span-2 row-start-2 justify-self-end whitespace-nowrap text-ink-2 sm:whitespace-normal sm:px-2.5 sm:py-2">

@@ -4,9 +4,10 @@ import { useTranslation } from 'react-i18next';
 import type { BodyInput } from '../../../../server/contract/endpoint';
 import type { api } from '../../../../server/contract/index';
 import { NumberField } from '../../../form/number-field';
-import { useFaultWords } from '../../../form/use-fault-words';
+import { useListFault } from '../../../form/use-list-fault';
 import { useFormat } from '../../../lib/format';
 import { Button, ButtonRow } from '../../../ui/button';
+import { FieldError } from '../../../ui/field';
 import { evenPlaces } from './probe-places';
 
 type Values = BodyInput<typeof api.freezers.tieSensor>;
@@ -23,18 +24,16 @@ const most = 8;
 export function ProbeFields({ widthIn, sent }: Props) {
   const { t } = useTranslation('freezer-page');
   const { inches } = useFormat();
-  const say = useFaultWords();
-  const { setValue, getFieldState, formState } = useFormContext<Values>();
+  const { setValue, formState } = useFormContext<Values>();
   const probes = useWatch<Values, 'probesIn'>({ name: 'probesIn' });
-  const { error } = getFieldState('probesIn', formState);
-  const message = error?.message ?? error?.root?.message;
+  const { fault, faultId } = useListFault('probesIn');
   const spread = (count: number) => setValue('probesIn', evenPlaces(count, widthIn), { shouldDirty: true, shouldValidate: formState.isSubmitted });
   return (
-    <fieldset className="min-w-0">
+    <fieldset className="min-w-0" aria-describedby={faultId}>
       <legend className="text-lead font-bold">{t('probes.title')}</legend>
       <p className="text-ink-2">{t('probes.lead', { width: inches(widthIn) })}</p>
       {sent > 0 && sent !== probes.length && <p className="font-semibold text-straw">{t('probes.sends', { count: sent })}</p>}
-      {message && <p className="font-semibold text-rust">{say(message)}</p>}
+      {faultId && <FieldError id={faultId}>{fault}</FieldError>}
       <div className="mt-2 grid grid-cols-2 gap-3 sm:grid-cols-3">
         {probes.map((_, i) => (
           <NumberField key={i} name={`probesIn.${i}`} label={t('probes.probe', { n: i + 1 })} />
