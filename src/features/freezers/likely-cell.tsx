@@ -24,7 +24,7 @@ export function LikelyCell({ row, standing, now, narrow }: CellProps) {
           <SpanMini now={now} early={early} likely={likely} late={late} truck={comingTruck(row.truck, now)} trouble={troubles.includes(standing.kind)} label={between} />
         </span>
       )}
-      <span className="min-w-28 shrink-0">{likely === null ? <NotSeen /> : <Clocks zone={timeZone} now={now} say={(words) => likelyWords({ ...row, likely }, words, now, t)} />}</span>
+      <span className="min-w-28 lg:shrink-0">{likely === null ? <NotSeen /> : <Clocks zone={timeZone} now={now} say={(words) => likelyWords({ ...row, likely }, words, now, t)} />}</span>
     </span>
   );
 }
