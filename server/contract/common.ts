@@ -55,6 +55,9 @@ export const span = z.strictObject({
 }).check(z.refine(({ from, to }) => from < to, { error: 'span-backwards', path: ['to'] }));
 export const spans = z.array(span).check(z.maxLength(14, fault('too-long')));
 
+/** What is retired is in a list only when asked for. */
+export const withRetired = z.strictObject({ retired: z.optional(z.literal('too')) });
+
 /** What a list is searched for. */
 export const search = z.optional(z.string().check(z.maxLength(120)));
 

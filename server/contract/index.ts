@@ -7,6 +7,7 @@ import * as districts from './districts';
 import * as fleet from './fleet';
 import * as freezerSettings from './freezer-settings';
 import * as freezers from './freezers';
+import * as models from './models';
 import * as people from './people';
 import * as products from './products';
 import * as requests from './requests';
@@ -53,7 +54,7 @@ export const api = {
   },
   trucks: { list: trucks.listTrucks, set: trucks.setTrucks },
   products: { list: products.listProducts, create: products.createProduct, change: products.changeProduct },
-  models: { list: products.listModels, create: products.createModel, change: products.changeModel },
+  models: { list: models.listModels, create: models.createModel, change: models.changeModel },
   comparison: { read: comparison.readComparison, csv: comparison.comparisonCsv },
   requests: {
     list: requests.listRequests,

@@ -32,7 +32,7 @@ interface Props {
 const most = 14;
 const usual: Span = { days: [1, 2, 3, 4, 5], from: '07:00', to: '15:00' };
 
-/** Hours on days of the week: any number of spans, each with its days and from when to when. */
+/** Hours on days of the week: as many spans as it takes, each with its days and from when to when. */
 export function SpansField({ name, labels }: Props) {
   const adder = useRef<HTMLButtonElement>(null);
   const { fields, append, remove } = useFieldArray({ name });

@@ -1,5 +1,6 @@
 import { isNotNull, sql, type SQL } from 'drizzle-orm';
-import type { FreezerModel, Product } from '../../contract/products';
+import type { FreezerModel } from '../../contract/models';
+import type { Product } from '../../contract/products';
 import type { ProducerDb } from '../producer-db';
 import { freezers, models, products } from '../schema';
 

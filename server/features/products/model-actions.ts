@@ -1,5 +1,5 @@
 import type { Body } from '../../contract/endpoint';
-import type { changeModel as changeEndpoint, createModel as createEndpoint, FreezerModel } from '../../contract/products';
+import type { changeModel as changeEndpoint, createModel as createEndpoint, FreezerModel } from '../../contract/models';
 import { eq, models, sql, type ProducerDb } from '../../db';
 import { modelsView } from '../../db/views/products';
 import type { ProducerContext } from '../../http/context';

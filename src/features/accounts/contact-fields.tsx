@@ -9,7 +9,7 @@ import { noContact, type Entered } from './entered';
 /** As many as the contract takes. */
 const MOST = 20;
 
-/** Whom to write to or call at the account: any number of people. */
+/** Whom to write to or call at the account: as many people as there are. */
 export function ContactFields() {
   const { t } = useTranslation('accounts');
   const { fields, append, remove } = useFieldArray<Entered, 'contacts'>({ name: 'contacts' });

@@ -1,5 +1,5 @@
 import { useTranslation } from 'react-i18next';
-import type { FreezerModel } from '../../../server/contract/products';
+import type { FreezerModel } from '../../../server/contract/models';
 import { Field } from '../../ui/field';
 import { Notice } from '../../ui/notice';
 import { TextInput } from '../../ui/text-input';

@@ -1,6 +1,6 @@
 import { useTranslation } from 'react-i18next';
 import { api } from '../../../server/contract/index';
-import type { FreezerModel } from '../../../server/contract/products';
+import type { FreezerModel } from '../../../server/contract/models';
 import { queryClient } from '../../api/query';
 import { Form } from '../../form/form';
 import { SubmitButton } from '../../form/submit-button';

@@ -1,4 +1,4 @@
-import type { FreezerModel } from '../../../server/contract/products';
+import type { FreezerModel } from '../../../server/contract/models';
 
 /** What the form about a model starts with. */
 export const modelEnteredOf = ({ name, insideWidthIn, insideDepthIn, insideHeightIn, doors, ratedPounds, defrost, version }: FreezerModel) => ({

@@ -1,7 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import type { Result } from '../../../server/contract/endpoint';
 import { api } from '../../../server/contract/index';
-import type { FreezerModel } from '../../../server/contract/products';
+import type { FreezerModel } from '../../../server/contract/models';
 import { useAct } from '../../api/act';
 import { page } from '../../api/page';
 import { RetireDialog } from '../../form/retire-dialog';

@@ -44,7 +44,7 @@ export interface Leaders {
   value: number;
 }
 
-/** Who leads a measure as it is shown, with a tenth; null where nobody has any. */
+/** Who leads a measure as it is shown, with a tenth; null where all have none. */
 export function leadersOf(stores: ComparedStore[], measure: Measure): Leaders | null {
   const value = tenth(worst(stores, measure));
   return value > 0 ? { value, stores: stores.filter((store) => tenth(store[measure]) === value) } : null;

@@ -18,7 +18,7 @@ export function StoreFilters({ places, retired = false }: Props) {
   const filters = useFilters();
   const isTold = useAbility().can('read', 'NextTruck');
   const trucks = ['', 'today', 'late', 'none'].map((value) => ({ value, label: t(`truck.${value || 'any'}`) }));
-  const named = (any: string, list: { id: string; name: string }[] = []) => [{ value: '', label: any }, ...list.map(({ id, name }) => ({ value: id, label: name }))];
+  const named = (all: string, list: { id: string; name: string }[] = []) => [{ value: '', label: all }, ...list.map(({ id, name }) => ({ value: id, label: name }))];
   const uses = [
     { value: '', label: t('retired.no') },
     { value: 'only', label: t('retired.only') },

@@ -2,10 +2,12 @@ import { useTranslation } from 'react-i18next';
 import { useNavigate } from 'react-router-dom';
 import type { FreezerSettings } from '../../../../server/contract/freezer-settings';
 import { api } from '../../../../server/contract/index';
+import { useAct } from '../../../api/act';
 import { call } from '../../../api/call';
 import { page } from '../../../api/page';
 import { q } from '../../../api/query';
 import { Form } from '../../../form/form';
+import { RetireSection } from '../../../form/retire-section';
 import { SubmitButton } from '../../../form/submit-button';
 import { useContractForm } from '../../../form/use-contract-form';
 import { useMembership } from '../../../lib/me';
@@ -14,7 +16,6 @@ import { FormFrame } from '../../../layouts/form-frame';
 import { showsFreezers } from '../shows-freezers';
 import { FreezerFields } from './freezer-fields';
 import { kindsQueries, type Kinds } from './kinds-query';
-import { RetireFreezer } from './retire-freezer';
 import { StoreField } from './store-field';
 import { useFreezerFields } from './use-freezer-fields';
 
@@ -34,12 +35,20 @@ interface Props extends Kinds {
 /** What is entered of a freezer, to be corrected; and the end of its use. */
 function ChangeFreezer({ settings, ...kinds }: Props) {
   const { t } = useTranslation('freezer-form');
+  const navigate = useNavigate();
   const { slug } = useMembership().producer;
+  const change = useAct(api.freezers.change, showsFreezers);
   const { id, name, storeId, retired } = settings;
   return (
     <FormFrame title={t('change.title')} lead={name} back={retired ? paths.store(slug, storeId) : paths.freezer(slug, id)} backTo={retired ? t('to-store') : t('back', { name })}>
       <ChangeForm settings={settings} {...kinds} />
-      <RetireFreezer settings={settings} />
+      <RetireSection
+        noun="freezer-form"
+        thing={settings}
+        send={(freezerId, body) => change.mutateAsync({ params: { producer: slug, freezerId }, body })}
+        source={api.freezers.readSettings}
+        onDone={(_, gone) => void navigate(gone ? paths.store(slug, storeId) : paths.freezer(slug, id))}
+      />
     </FormFrame>
   );
 }

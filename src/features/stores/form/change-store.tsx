@@ -2,16 +2,17 @@ import { useTranslation } from 'react-i18next';
 import { useNavigate } from 'react-router-dom';
 import { api } from '../../../../server/contract/index';
 import type { StoreSettings } from '../../../../server/contract/store-settings';
+import { useAct } from '../../../api/act';
 import { call } from '../../../api/call';
 import { page } from '../../../api/page';
 import { q } from '../../../api/query';
 import { Form } from '../../../form/form';
+import { RetireSection } from '../../../form/retire-section';
 import { SubmitButton } from '../../../form/submit-button';
 import { useContractForm } from '../../../form/use-contract-form';
 import { useMembership } from '../../../lib/me';
 import { paths } from '../../../paths';
 import { placesQuery, type Places } from '../../people/places-query';
-import { RetireStore } from './retire-store';
 import { showsStores } from './shows-stores';
 import { StoreFields } from './store-fields';
 import { FormFrame } from '../../../layouts/form-frame';
@@ -34,7 +35,9 @@ interface Props {
 /** What is entered of a store, to be corrected; and the end of its use. */
 function ChangeStore({ settings, places }: Props) {
   const { t } = useTranslation('store-form');
+  const navigate = useNavigate();
   const { slug } = useMembership().producer;
+  const change = useAct(api.stores.change, showsStores);
   // A retired store has no page to go back to.
   const way = settings.retired
     ? { back: paths.stores(slug), backTo: t('all') }
@@ -42,7 +45,13 @@ function ChangeStore({ settings, places }: Props) {
   return (
     <FormFrame title={t('change.title')} lead={settings.name} {...way}>
       <ChangeForm settings={settings} places={places} />
-      <RetireStore settings={settings} />
+      <RetireSection
+        noun="store-form"
+        thing={settings}
+        send={(storeId, body) => change.mutateAsync({ params: { producer: slug, storeId }, body })}
+        source={api.stores.readSettings}
+        onDone={(_, retired) => void navigate(retired ? paths.stores(slug) : paths.store(slug, settings.id))}
+      />
     </FormFrame>
   );
 }
